@@ -1,0 +1,139 @@
+import { existsSync, readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import type { Finding } from '../../src/finding.ts';
+import { InputError } from '../../src/finding.ts';
+import { taskOf } from '../choose/task.ts';
+import { type Task, type Variant, describeVariant, makeVariant } from '../choose/variant.ts';
+import { digest } from '../files/digest.ts';
+import { printFormula } from '../formula/text.ts';
+import { Judge } from '../observe/judge.ts';
+import { importKernel } from '../observe/module.ts';
+import type { Candidate } from '../observe/observe.ts';
+import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
+import { codeSize } from '../cost/code-size.ts';
+import { FILES, errorSentence } from './files.ts';
+import { outputsDigest } from './outputs-digest.ts';
+
+/**
+ * Checks the files of a variant against the model, from scratch: the kernel is lowered again and compared with the
+ * emitted text, its operations and sizes counted again, its outputs computed again, and the worst inputs replayed.
+ *
+ * @param folder the variant's folder
+ * @returns what differs; empty when all is as the certificate says
+ * @throws InputError when a file is missing or is no certificate
+ */
+export async function recheck(folder: string): Promise<readonly Finding[]> {
+  const certificate = parse<Certificate>(folder, FILES.certificate);
+  const worst = parse<Record<string, readonly Candidate[]>>(folder, FILES.worst);
+  const code = read(folder, FILES.code);
+  const errors = Object.fromEntries(Object.entries(certificate.error).map(([key, entry]) => [key, entry.observed]));
+  const task = taskOf({ model: certificate.model, domain: certificate.domain.name, error: errors }, join(folder, FILES.certificate));
+  const fresh = makeVariant(task, certificate.choices);
+  const sentences = Object.entries(certificate.error).map(([key, entry]) => errorSentence(key, entry));
+  const expected = describeVariant(task, fresh.kernel, sentences);
+  return [
+    ...compareCode(folder, code, expected.code),
+    ...(await compareCertificate(folder, certificate, task, expected, code)),
+    ...(await replay(folder, certificate, task, worst, code)),
+  ];
+}
+
+/** Names the first line in which the emitted text differs from what the model gives. */
+function compareCode(folder: string, code: string, expected: string): readonly Finding[] {
+  if (code === expected) return [];
+  const [have, want] = [code.split('\n'), expected.split('\n')];
+  const index = want.findIndex((line, k) => line !== have[k]);
+  const line = index < 0 ? want.length : index;
+  return [
+    {
+      code: 'recheck.code',
+      place: { file: join(folder, FILES.code), line: line + 1 },
+      what: `the line reads "${(have[line] ?? '').trim()}", the model gives "${(want[line] ?? '').trim()}"`,
+      why: 'The certificate speaks of the code that the model gives.',
+      remedy: 'Generate the folder again.',
+    },
+  ];
+}
+
+async function compareCertificate(folder: string, certificate: Certificate, task: Task, expected: Variant, code: string): Promise<readonly Finding[]> {
+  const judge = new Judge(task.formula, await importKernel(code), task.model.frameRate);
+  const names = task.formula.inputs.map((input) => input.name);
+  const ranges = Object.fromEntries(task.formula.inputs.map(({ name, unit }) => [name, { ...task.domain[name]!, unit }]));
+  const facts: readonly (readonly [name: string, stated: unknown, found: unknown])[] = [
+    ['domain.ranges', certificate.domain.ranges, ranges],
+    ['operations', certificate.operations, expected.cost],
+    ['state', certificate.state, { words: expected.kernel.state.length, bytes: expected.stateBytes }],
+    ['code', certificate.code, await codeSize(code)],
+    ['digest.kernel', certificate.digest.kernel, digest(code)],
+    ['digest.model', certificate.digest.model, digest(printFormula(task.formula))],
+    ['digest.outputs', certificate.digest.outputs, outputsDigest(judge, task.domain, names)],
+  ];
+  return facts.flatMap(([name, stated, found]) =>
+    JSON.stringify(stated) === JSON.stringify(found) ? [] : [differs(folder, `${name} is stated as ${JSON.stringify(stated)} and found to be ${JSON.stringify(found)}`)],
+  );
+}
+
+/** Runs the worst inputs again: each must give the error that is kept with it, and none more than is stated. */
+async function replay(
+  folder: string,
+  certificate: Certificate,
+  task: Task,
+  worst: Readonly<Record<string, readonly Candidate[]>>,
+  code: string,
+): Promise<readonly Finding[]> {
+  const judge = new Judge(task.formula, await importKernel(code), task.model.frameRate);
+  const findings: Finding[] = [];
+  for (const group of judge.groups) {
+    const stated = certificate.error[ERROR_KEY_OF_GROUP[group]!]?.observed;
+    const kept = worst[group] ?? [];
+    if (kept.length === 0 || stated === undefined) {
+      findings.push(differs(folder, `no worst input of ${group} is kept`));
+      continue;
+    }
+    const found = kept.map(({ point }) => judge.errors(point).get(group)!.size);
+    for (const [k, { size }] of kept.entries()) {
+      if (found[k] !== size) findings.push(differs(folder, `worst input ${k} of ${group} is kept with error ${size} and gives ${found[k]}`));
+    }
+    if (Math.max(...found) !== stated) findings.push(differs(folder, `the observed error of ${group} is stated as ${stated} and its worst input gives ${Math.max(...found)}`));
+  }
+  return findings;
+}
+
+function differs(folder: string, what: string): Finding {
+  return {
+    code: 'recheck.certificate',
+    place: { file: join(folder, FILES.certificate) },
+    what,
+    why: 'A certificate is worth what can be found again.',
+    remedy: 'Generate the folder again, or find out who changed it.',
+  };
+}
+
+function read(folder: string, name: string): string {
+  const path = join(folder, name);
+  if (!existsSync(path)) {
+    throw new InputError({
+      code: 'recheck.missing',
+      place: { file: path },
+      what: 'the file is missing',
+      why: `A variant's folder holds ${Object.values(FILES).join(', ')}.`,
+      remedy: 'Name the folder of a variant, or generate it.',
+    });
+  }
+  return readFileSync(path, 'utf8');
+}
+
+function parse<T>(folder: string, name: string): T {
+  const text = read(folder, name);
+  try {
+    return JSON.parse(text) as T;
+  } catch (error) {
+    throw new InputError({
+      code: 'recheck.syntax',
+      place: { file: join(folder, name) },
+      what: `not JSON: ${(error as Error).message}`,
+      why: 'The file is truncated or was edited.',
+      remedy: 'Generate the folder again.',
+    });
+  }
+}

@@ -1,0 +1,101 @@
+import { codeSize } from '../cost/code-size.ts';
+import { type Choices, arithmeticName } from '../kernel/choices.ts';
+import { type Effort, FULL_EFFORT, type Observed, observe } from '../observe/observe.ts';
+import { type Budget, ERROR_KEYS } from './budget.ts';
+import { candidates } from './candidates.ts';
+import { type Task, type Variant, judgeOf, makeVariant } from './variant.ts';
+
+/** A short look that can only rule variants out: an error seen is an error. */
+const FIRST_LOOK: Effort = { points: 2000, starts: 1, steps: 0, seed: 3 };
+
+/** A limit that a variant breaks. */
+export interface Excess {
+  readonly limit: string;
+  readonly allowed: number;
+  readonly found: number;
+}
+
+/** A variant that was tried, with what was seen of its errors and the limits that it breaks. */
+export interface Trial {
+  readonly choices: Choices;
+  readonly variant: Variant;
+  readonly observed: readonly Observed[];
+  readonly excesses: readonly Excess[];
+}
+
+/** Told what is being done, and the share of it from 0 to 1. */
+export type Progress = (what: string, share: number) => void;
+
+/**
+ * Finds the cheapest variant within a budget: variants in the order of their operations a tick (roundings counted),
+ * the first whose size and observed error fit.
+ *
+ * @param task what is generated
+ * @param budget limits
+ * @param progress told what is going on
+ * @returns every trial in order; the last one fits if any does
+ */
+export async function choose(task: Task, budget: Budget, progress: Progress): Promise<readonly Trial[]> {
+  const trials: Trial[] = [];
+  for (const [choices, variant] of inOrderOfCost(task, budget)) {
+    const sizes = await sizeExcesses(variant, budget);
+    if (sizes.length > 0) {
+      trials.push({ choices, variant, observed: [], excesses: sizes });
+      continue;
+    }
+    const first = await look(task, variant, FIRST_LOOK, () => {});
+    const early = errorExcesses(first, budget);
+    if (early.length > 0) {
+      trials.push({ choices, variant, observed: first, excesses: early });
+      continue;
+    }
+    const observed = await look(task, variant, FULL_EFFORT, (share) => progress(variantName(choices), share));
+    const excesses = errorExcesses(observed, budget);
+    trials.push({ choices, variant, observed, excesses });
+    if (excesses.length === 0) return trials;
+  }
+  return trials;
+}
+
+/** Observes a variant's own code over the task's domain. */
+export async function look(task: Task, variant: Variant, effort: Effort, progress: (share: number) => void): Promise<readonly Observed[]> {
+  const names = task.formula.inputs.map((input) => input.name);
+  return observe(await judgeOf(task, variant), task.domain, names, effort, progress);
+}
+
+/** A variant by its arithmetic and cap, such as `f64, cap 2`. */
+export function variantName(choices: Choices): string {
+  return `${arithmeticName(choices)}, cap ${choices.cap}`;
+}
+
+function inOrderOfCost(task: Task, budget: Budget): readonly (readonly [Choices, Variant])[] {
+  const cost = ({ cost: { tick, setup } }: Variant) => [tick.total + tick.round, setup.total + setup.round] as const;
+  return candidates(budget, task.domain)
+    .map((choices) => [choices, makeVariant(task, choices)] as const)
+    .sort(([, a], [, b]) => cost(a)[0] - cost(b)[0] || cost(a)[1] - cost(b)[1]);
+}
+
+async function sizeExcesses(variant: Variant, budget: Budget): Promise<readonly Excess[]> {
+  const { bytes, minified_bytes } = await codeSize(variant.code);
+  return excesses([
+    ['tick_operations', budget.tick_operations, variant.cost.tick.total],
+    ['setup_operations', budget.setup_operations, variant.cost.setup.total],
+    ['state_bytes', budget.state_bytes, variant.stateBytes],
+    ['code_bytes', budget.code_bytes, bytes],
+    ['minified_bytes', budget.minified_bytes, minified_bytes],
+  ]);
+}
+
+function errorExcesses(observed: readonly Observed[], budget: Budget): readonly Excess[] {
+  return excesses(
+    Object.entries(ERROR_KEYS).map(([key, group]) => [
+      key,
+      budget.error[key as keyof Budget['error']],
+      observed.find((entry) => entry.group === group)?.size ?? 0,
+    ]),
+  );
+}
+
+function excesses(list: readonly (readonly [limit: string, allowed: number | undefined, found: number])[]): readonly Excess[] {
+  return list.flatMap(([limit, allowed, found]) => (allowed !== undefined && found > allowed ? [{ limit, allowed, found }] : []));
+}

@@ -1,0 +1,43 @@
+import { type Kernel, type Line, isRounded } from '../kernel/kernel.ts';
+
+const INFIX: Readonly<Record<string, string>> = { add: '+', sub: '-', mul: '*', div: '/' };
+
+/** The right-hand side of a line: one operation, with its rounding to float32 where the line is float32. */
+export function expression(kernel: Kernel, line: Line): string {
+  const args = line.args.map((arg) => operand(kernel.lines[arg]!));
+  const text = operation(line, args);
+  return line.format === 'f32' && isRounded(line.operation) ? `fround(${text})` : text;
+}
+
+/** How a line is written where it is used: constants by their value, all others by name. */
+export function operand(line: Line): string {
+  return line.operation === 'constant' ? literal(line.value) : line.name;
+}
+
+/** The shortest decimal that reads back as the same float64 number. */
+export function literal(value: number): string {
+  return Object.is(value, -0) ? '-0' : String(value);
+}
+
+function operation(line: Line, args: readonly string[]): string {
+  const [a, b, c, d] = args;
+  switch (line.operation) {
+    case 'add':
+    case 'sub':
+    case 'mul':
+    case 'div':
+      return `${a} ${INFIX[line.operation]} ${b}`;
+    case 'neg':
+      return `-${a}`;
+    case 'select':
+      return `${a} < ${b} ? ${c} : ${d}`;
+    case 'round':
+      return `fround(${a})`;
+    case 'sqrt':
+    case 'abs':
+    case 'floor':
+      return `Math.${line.operation}(${a})`;
+    default:
+      throw new Error(`a line of kind ${line.operation} has no expression`);
+  }
+}

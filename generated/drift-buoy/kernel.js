@@ -1,0 +1,541 @@
+/**
+ * Generated file, do not edit: change the budget or the model and generate again.
+ *
+ * GPS broadcast ephemeris (legacy navigation message), Earth-fixed position and clock.
+ * Model gps-lnav: IS-GPS-200, Table 20-IV and 20.3.3.3.3; formula sha256 5f836c5a9091cf697931b1ab8c6fb4ce7d2fbf92e8c01aaf6eb3273e2c4ce794.
+ * Domain flown. Choices: arithmetic f64-setup-f32-tick, Kepler starter secondOrder, corrector newton, cap 1.
+ * Error position_m: 14.4 observed, not yet certified.
+ *
+ * Not certified for safety of life. The interface documents, local rules and licensed practice decide.
+ */
+const fround = Math.fround;
+
+/** Words of the state array. */
+export const stateWords = 21;
+
+/**
+ * Prepares the state of one satellite; call it once for each upload of elements.
+ *
+ * @param elements record of numbers: sqrtA, e, i0, Omega0, omega, M0, deltaN, IDOT, OmegaDot, Cuc, Cus, Crc, Crs, Cic, Cis, toe; ranges and units:
+ *   sqrtA [5150, 5160] m^(1/2)
+ *   e [0, 0.03] 1
+ *   i0 [0.9, 1.02] rad
+ *   Omega0 [-3.141592653589793, 3.141592653589793] rad
+ *   omega [-3.141592653589793, 3.141592653589793] rad
+ *   M0 [-3.141592653589793, 3.141592653589793] rad
+ *   deltaN [-1.1703344634137303e-8, 1.1703344634137303e-8] rad/s
+ *   IDOT [-2.925836158534326e-9, 2.925836158534326e-9] rad/s
+ *   OmegaDot [-1e-8, -6e-9] rad/s
+ *   Cuc [-0.00006103515625, 0.00006103515625] rad
+ *   Cus [-0.00006103515625, 0.00006103515625] rad
+ *   Crc [-1024, 1024] m
+ *   Crs [-1024, 1024] m
+ *   Cic [-0.00006103515625, 0.00006103515625] rad
+ *   Cis [-0.00006103515625, 0.00006103515625] rad
+ *   toe [0, 604784] s
+ * @param state Float32Array of stateWords words, written
+ * @returns 0 good; 1 an element outside its range; 3 an element that is not a finite number.
+ *   After any other status than 0 the state is void, and position returns 1.
+ */
+export function setup(elements, state) {
+  state[0] = 0;
+  const sqrtA = elements.sqrtA;
+  if (!(sqrtA >= 5150 && sqrtA <= 5160)) return sqrtA - sqrtA === 0 ? 1 : 3;
+  const e = elements.e;
+  if (!(e >= 0 && e <= 0.03)) return e - e === 0 ? 1 : 3;
+  const i0 = elements.i0;
+  if (!(i0 >= 0.9 && i0 <= 1.02)) return i0 - i0 === 0 ? 1 : 3;
+  const Omega0 = elements.Omega0;
+  if (!(Omega0 >= -3.141592653589793 && Omega0 <= 3.141592653589793)) return Omega0 - Omega0 === 0 ? 1 : 3;
+  const omega = elements.omega;
+  if (!(omega >= -3.141592653589793 && omega <= 3.141592653589793)) return omega - omega === 0 ? 1 : 3;
+  const M0 = elements.M0;
+  if (!(M0 >= -3.141592653589793 && M0 <= 3.141592653589793)) return M0 - M0 === 0 ? 1 : 3;
+  const deltaN = elements.deltaN;
+  if (!(deltaN >= -1.1703344634137303e-8 && deltaN <= 1.1703344634137303e-8)) return deltaN - deltaN === 0 ? 1 : 3;
+  const IDOT = elements.IDOT;
+  if (!(IDOT >= -2.925836158534326e-9 && IDOT <= 2.925836158534326e-9)) return IDOT - IDOT === 0 ? 1 : 3;
+  const OmegaDot = elements.OmegaDot;
+  if (!(OmegaDot >= -1e-8 && OmegaDot <= -6e-9)) return OmegaDot - OmegaDot === 0 ? 1 : 3;
+  const Cuc = elements.Cuc;
+  if (!(Cuc >= -0.00006103515625 && Cuc <= 0.00006103515625)) return Cuc - Cuc === 0 ? 1 : 3;
+  const Cus = elements.Cus;
+  if (!(Cus >= -0.00006103515625 && Cus <= 0.00006103515625)) return Cus - Cus === 0 ? 1 : 3;
+  const Crc = elements.Crc;
+  if (!(Crc >= -1024 && Crc <= 1024)) return Crc - Crc === 0 ? 1 : 3;
+  const Crs = elements.Crs;
+  if (!(Crs >= -1024 && Crs <= 1024)) return Crs - Crs === 0 ? 1 : 3;
+  const Cic = elements.Cic;
+  if (!(Cic >= -0.00006103515625 && Cic <= 0.00006103515625)) return Cic - Cic === 0 ? 1 : 3;
+  const Cis = elements.Cis;
+  if (!(Cis >= -0.00006103515625 && Cis <= 0.00006103515625)) return Cis - Cis === 0 ? 1 : 3;
+  const toe = elements.toe;
+  if (!(toe >= 0 && toe <= 604784)) return toe - toe === 0 ? 1 : 3;
+  const A = sqrtA * sqrtA;
+  const A32 = fround(A);
+  const e32 = fround(e);
+  const v1 = M0 * 0.6366197723675814;
+  const v2 = v1 + 0.5;
+  const v3 = Math.floor(v2);
+  const v4 = v3 * 0.5;
+  const v5 = Math.floor(v4);
+  const v6 = v5 + v5;
+  const v7 = v3 - v6;
+  const v8 = v3 * 1.5707963267948966;
+  const v9 = M0 - v8;
+  const v10 = v3 * 6.123233995736757e-17;
+  const v11 = v9 - v10;
+  const v12 = v3 * 8.4784276603689e-32;
+  const v13 = v11 - v12;
+  const v14 = v13 * v13;
+  const v15 = v14 * 4.779477332387385e-14;
+  const v16 = -1.1470745597729725e-11 + v15;
+  const v17 = v14 * v16;
+  const v18 = 2.08767569878681e-9 + v17;
+  const v19 = v14 * v18;
+  const v20 = -2.755731922398589e-7 + v19;
+  const v21 = v14 * v20;
+  const v22 = 0.0000248015873015873 + v21;
+  const v23 = v14 * v22;
+  const v24 = -0.001388888888888889 + v23;
+  const v25 = v14 * v24;
+  const v26 = 0.041666666666666664 + v25;
+  const v27 = v14 * v26;
+  const v28 = -0.5 + v27;
+  const v29 = v14 * v28;
+  const v30 = 1 + v29;
+  const v31 = v13 * v14;
+  const v32 = v14 * 2.8114572543455206e-15;
+  const v33 = -7.647163731819816e-13 + v32;
+  const v34 = v14 * v33;
+  const v35 = 1.6059043836821613e-10 + v34;
+  const v36 = v14 * v35;
+  const v37 = -2.505210838544172e-8 + v36;
+  const v38 = v14 * v37;
+  const v39 = 0.0000027557319223985893 + v38;
+  const v40 = v14 * v39;
+  const v41 = -0.0001984126984126984 + v40;
+  const v42 = v14 * v41;
+  const v43 = 0.008333333333333333 + v42;
+  const v44 = v14 * v43;
+  const v45 = -0.16666666666666666 + v44;
+  const v46 = v31 * v45;
+  const v47 = v13 + v46;
+  const v48 = v7 < 0.5 ? v30 : v47;
+  const v49 = v5 * 0.5;
+  const v50 = Math.floor(v49);
+  const v51 = v50 + v50;
+  const v52 = v5 - v51;
+  const v53 = v52 + v52;
+  const v54 = 1 - v53;
+  const v55 = -v54;
+  const v56 = v7 < 0.5 ? v54 : v55;
+  const v57 = v48 * v56;
+  const v5732 = fround(v57);
+  const v58 = A * A;
+  const v59 = v58 * A;
+  const v60 = 398600500000000 / v59;
+  const n0 = Math.sqrt(v60);
+  const n = n0 + deltaN;
+  const n32 = fround(n);
+  const v61 = v7 < 0.5 ? v47 : v30;
+  const v62 = v61 * v54;
+  const v6232 = fround(v62);
+  const Crs32 = fround(Crs);
+  const v63 = e * e;
+  const v64 = 1 - v63;
+  const v65 = Math.sqrt(v64);
+  const v66 = omega * 0.6366197723675814;
+  const v67 = v66 + 0.5;
+  const v68 = Math.floor(v67);
+  const v69 = v68 * 0.5;
+  const v70 = Math.floor(v69);
+  const v71 = v70 + v70;
+  const v72 = v68 - v71;
+  const v73 = v68 * 1.5707963267948966;
+  const v74 = omega - v73;
+  const v75 = v68 * 6.123233995736757e-17;
+  const v76 = v74 - v75;
+  const v77 = v68 * 8.4784276603689e-32;
+  const v78 = v76 - v77;
+  const v79 = v78 * v78;
+  const v80 = v79 * 4.779477332387385e-14;
+  const v81 = -1.1470745597729725e-11 + v80;
+  const v82 = v79 * v81;
+  const v83 = 2.08767569878681e-9 + v82;
+  const v84 = v79 * v83;
+  const v85 = -2.755731922398589e-7 + v84;
+  const v86 = v79 * v85;
+  const v87 = 0.0000248015873015873 + v86;
+  const v88 = v79 * v87;
+  const v89 = -0.001388888888888889 + v88;
+  const v90 = v79 * v89;
+  const v91 = 0.041666666666666664 + v90;
+  const v92 = v79 * v91;
+  const v93 = -0.5 + v92;
+  const v94 = v79 * v93;
+  const v95 = 1 + v94;
+  const v96 = v78 * v79;
+  const v97 = v79 * 2.8114572543455206e-15;
+  const v98 = -7.647163731819816e-13 + v97;
+  const v99 = v79 * v98;
+  const v100 = 1.6059043836821613e-10 + v99;
+  const v101 = v79 * v100;
+  const v102 = -2.505210838544172e-8 + v101;
+  const v103 = v79 * v102;
+  const v104 = 0.0000027557319223985893 + v103;
+  const v105 = v79 * v104;
+  const v106 = -0.0001984126984126984 + v105;
+  const v107 = v79 * v106;
+  const v108 = 0.008333333333333333 + v107;
+  const v109 = v79 * v108;
+  const v110 = -0.16666666666666666 + v109;
+  const v111 = v96 * v110;
+  const v112 = v78 + v111;
+  const v113 = v72 < 0.5 ? v95 : v112;
+  const v114 = v70 * 0.5;
+  const v115 = Math.floor(v114);
+  const v116 = v115 + v115;
+  const v117 = v70 - v116;
+  const v118 = v117 + v117;
+  const v119 = 1 - v118;
+  const v120 = -v119;
+  const v121 = v72 < 0.5 ? v119 : v120;
+  const cosomega = v113 * v121;
+  const v122 = v65 * cosomega;
+  const v12232 = fround(v122);
+  const v123 = v72 < 0.5 ? v112 : v95;
+  const sinomega = v123 * v119;
+  const sinomega32 = fround(sinomega);
+  const cosomega32 = fround(cosomega);
+  const v124 = v65 * sinomega;
+  const v12432 = fround(v124);
+  const Crc32 = fround(Crc);
+  const Cus32 = fround(Cus);
+  const Cuc32 = fround(Cuc);
+  const v125 = 0.000072921151467 * toe;
+  const v126 = Omega0 - v125;
+  const v127 = v126 * 0.6366197723675814;
+  const v128 = v127 + 0.5;
+  const v129 = Math.floor(v128);
+  const v130 = v129 * 0.5;
+  const v131 = Math.floor(v130);
+  const v132 = v131 + v131;
+  const v133 = v129 - v132;
+  const v134 = v129 * 1.5707963267948912;
+  const v135 = v126 - v134;
+  const v136 = v129 * 5.390302858158081e-15;
+  const v137 = v135 - v136;
+  const v138 = v129 * 3.795010772721225e-29;
+  const v139 = v137 - v138;
+  const v140 = v139 * v139;
+  const v141 = v140 * 4.779477332387385e-14;
+  const v142 = -1.1470745597729725e-11 + v141;
+  const v143 = v140 * v142;
+  const v144 = 2.08767569878681e-9 + v143;
+  const v145 = v140 * v144;
+  const v146 = -2.755731922398589e-7 + v145;
+  const v147 = v140 * v146;
+  const v148 = 0.0000248015873015873 + v147;
+  const v149 = v140 * v148;
+  const v150 = -0.001388888888888889 + v149;
+  const v151 = v140 * v150;
+  const v152 = 0.041666666666666664 + v151;
+  const v153 = v140 * v152;
+  const v154 = -0.5 + v153;
+  const v155 = v140 * v154;
+  const v156 = 1 + v155;
+  const v157 = v139 * v140;
+  const v158 = v140 * 2.8114572543455206e-15;
+  const v159 = -7.647163731819816e-13 + v158;
+  const v160 = v140 * v159;
+  const v161 = 1.6059043836821613e-10 + v160;
+  const v162 = v140 * v161;
+  const v163 = -2.505210838544172e-8 + v162;
+  const v164 = v140 * v163;
+  const v165 = 0.0000027557319223985893 + v164;
+  const v166 = v140 * v165;
+  const v167 = -0.0001984126984126984 + v166;
+  const v168 = v140 * v167;
+  const v169 = 0.008333333333333333 + v168;
+  const v170 = v140 * v169;
+  const v171 = -0.16666666666666666 + v170;
+  const v172 = v157 * v171;
+  const v173 = v139 + v172;
+  const v174 = v133 < 0.5 ? v156 : v173;
+  const v175 = v131 * 0.5;
+  const v176 = Math.floor(v175);
+  const v177 = v176 + v176;
+  const v178 = v131 - v177;
+  const v179 = v178 + v178;
+  const v180 = 1 - v179;
+  const v181 = -v180;
+  const v182 = v133 < 0.5 ? v180 : v181;
+  const v183 = v174 * v182;
+  const v18332 = fround(v183);
+  const v184 = OmegaDot - 0.000072921151467;
+  const v18432 = fround(v184);
+  const v185 = v133 < 0.5 ? v173 : v156;
+  const v186 = v185 * v180;
+  const v18632 = fround(v186);
+  const v187 = i0 * i0;
+  const v188 = v187 * -1.5619206968586225e-16;
+  const v189 = 4.779477332387385e-14 + v188;
+  const v190 = v187 * v189;
+  const v191 = -1.1470745597729725e-11 + v190;
+  const v192 = v187 * v191;
+  const v193 = 2.08767569878681e-9 + v192;
+  const v194 = v187 * v193;
+  const v195 = -2.755731922398589e-7 + v194;
+  const v196 = v187 * v195;
+  const v197 = 0.0000248015873015873 + v196;
+  const v198 = v187 * v197;
+  const v199 = -0.001388888888888889 + v198;
+  const v200 = v187 * v199;
+  const v201 = 0.041666666666666664 + v200;
+  const v202 = v187 * v201;
+  const v203 = -0.5 + v202;
+  const v204 = v187 * v203;
+  const v205 = 1 + v204;
+  const v20532 = fround(v205);
+  const IDOT32 = fround(IDOT);
+  const Cis32 = fround(Cis);
+  const Cic32 = fround(Cic);
+  const v206 = i0 * v187;
+  const v207 = v187 * -8.22063524662433e-18;
+  const v208 = 2.8114572543455206e-15 + v207;
+  const v209 = v187 * v208;
+  const v210 = -7.647163731819816e-13 + v209;
+  const v211 = v187 * v210;
+  const v212 = 1.6059043836821613e-10 + v211;
+  const v213 = v187 * v212;
+  const v214 = -2.505210838544172e-8 + v213;
+  const v215 = v187 * v214;
+  const v216 = 0.0000027557319223985893 + v215;
+  const v217 = v187 * v216;
+  const v218 = -0.0001984126984126984 + v217;
+  const v219 = v187 * v218;
+  const v220 = 0.008333333333333333 + v219;
+  const v221 = v187 * v220;
+  const v222 = -0.16666666666666666 + v221;
+  const v223 = v206 * v222;
+  const v224 = i0 + v223;
+  const v22432 = fround(v224);
+  state[0] = n32;
+  state[1] = v5732;
+  state[2] = v6232;
+  state[3] = e32;
+  state[4] = A32;
+  state[5] = v12232;
+  state[6] = sinomega32;
+  state[7] = cosomega32;
+  state[8] = v12432;
+  state[9] = Crs32;
+  state[10] = Crc32;
+  state[11] = Cus32;
+  state[12] = Cuc32;
+  state[13] = v18432;
+  state[14] = v18332;
+  state[15] = v18632;
+  state[16] = IDOT32;
+  state[17] = Cis32;
+  state[18] = Cic32;
+  state[19] = v20532;
+  state[20] = v22432;
+  return 0;
+}
+
+/**
+ * Predicts at one epoch, in the same operations for every input.
+ *
+ * @param t time since the reference epoch of the elements, s, in [-7200, 7200]
+ * @param state Float32Array that setup filled
+ * @param out array of numbers, written only with status 0:
+ *   out[0] position x, m
+ *   out[1] position y, m
+ *   out[2] position z, m
+ * @returns 0 good; 1 a state that setup did not fill; 2 t outside its span; 3 t not a finite number.
+ */
+export function position(t, state, out) {
+  if (!(t >= -7200 && t <= 7200)) return t - t === 0 ? 2 : 3;
+  const n32 = state[0];
+  const v5732 = state[1];
+  const v6232 = state[2];
+  const e32 = state[3];
+  const A32 = state[4];
+  const v12232 = state[5];
+  const sinomega32 = state[6];
+  const cosomega32 = state[7];
+  const v12432 = state[8];
+  const Crs32 = state[9];
+  const Crc32 = state[10];
+  const Cus32 = state[11];
+  const Cuc32 = state[12];
+  const v18432 = state[13];
+  const v18332 = state[14];
+  const v18632 = state[15];
+  const IDOT32 = state[16];
+  const Cis32 = state[17];
+  const Cic32 = state[18];
+  const v20532 = state[19];
+  const v22432 = state[20];
+  if (!(n32 > 0)) return 1;
+  const t32 = fround(t);
+  const v225 = fround(n32 * t32);
+  const v226 = fround(v225 * v225);
+  const v227 = fround(v226 * -2.755731998149713e-7);
+  const v228 = fround(0.000024801587642286904 + v227);
+  const v229 = fround(v226 * v228);
+  const v230 = fround(-0.0013888889225199819 + v229);
+  const v231 = fround(v226 * v230);
+  const v232 = fround(0.0416666679084301 + v231);
+  const v233 = fround(v226 * v232);
+  const v234 = fround(-0.5 + v233);
+  const v235 = fround(v226 * v234);
+  const v236 = fround(1 + v235);
+  const v237 = fround(v5732 * v236);
+  const v238 = fround(v225 * v226);
+  const v239 = fround(v226 * -2.5052107943679403e-8);
+  const v240 = fround(0.0000027557318844628753 + v239);
+  const v241 = fround(v226 * v240);
+  const v242 = fround(-0.00019841270113829523 + v241);
+  const v243 = fround(v226 * v242);
+  const v244 = fround(0.008333333767950535 + v243);
+  const v245 = fround(v226 * v244);
+  const v246 = fround(-0.1666666716337204 + v245);
+  const v247 = fround(v238 * v246);
+  const v248 = fround(v225 + v247);
+  const v249 = fround(v6232 * v248);
+  const cosM = fround(v237 - v249);
+  const v250 = fround(v6232 * v236);
+  const v251 = fround(v5732 * v248);
+  const sinM = fround(v250 + v251);
+  const v252 = fround(e32 * sinM);
+  const v253 = fround(e32 * cosM);
+  const v254 = fround(v252 * v253);
+  const v255 = fround(v252 + v254);
+  const v256 = fround(v255 * v255);
+  const v257 = fround(v256 * 0.0416666679084301);
+  const v258 = fround(-0.5 + v257);
+  const v259 = fround(v256 * v258);
+  const v260 = fround(1 + v259);
+  const v261 = fround(v252 * v260);
+  const v262 = fround(v255 * v256);
+  const v263 = fround(v262 * -0.1666666716337204);
+  const v264 = fround(v255 + v263);
+  const v265 = fround(v253 * v264);
+  const v266 = fround(v261 + v265);
+  const v267 = fround(v255 - v266);
+  const v268 = fround(v253 * v260);
+  const v269 = fround(v252 * v264);
+  const v270 = fround(v268 - v269);
+  const v271 = fround(1 - v270);
+  const v272 = fround(v267 / v271);
+  const v273 = fround(v255 - v272);
+  const v274 = fround(v273 * v273);
+  const v275 = fround(v274 * 0.0416666679084301);
+  const v276 = fround(-0.5 + v275);
+  const v277 = fround(v274 * v276);
+  const v278 = fround(1 + v277);
+  const v279 = fround(cosM * v278);
+  const v280 = fround(v273 * v274);
+  const v281 = fround(v280 * -0.1666666716337204);
+  const v282 = fround(v273 + v281);
+  const v283 = fround(sinM * v282);
+  const cosE = fround(v279 - v283);
+  const v284 = fround(e32 * cosE);
+  const v285 = fround(1 - v284);
+  const v286 = fround(A32 * v285);
+  const v287 = fround(sinM * v278);
+  const v288 = fround(cosM * v282);
+  const sinE = fround(v287 + v288);
+  const v289 = fround(1 / v285);
+  const v290 = fround(sinE * v289);
+  const v291 = fround(v12232 * v290);
+  const v292 = fround(cosE - e32);
+  const cosnu = fround(v292 * v289);
+  const v293 = fround(cosnu * sinomega32);
+  const sinphi = fround(v291 + v293);
+  const v294 = fround(sinphi + sinphi);
+  const v295 = fround(cosnu * cosomega32);
+  const v296 = fround(v12432 * v290);
+  const cosphi = fround(v295 - v296);
+  const sin2phi = fround(v294 * cosphi);
+  const v297 = fround(Crs32 * sin2phi);
+  const v298 = fround(v294 * sinphi);
+  const cos2phi = fround(1 - v298);
+  const v299 = fround(Crc32 * cos2phi);
+  const v300 = fround(v297 + v299);
+  const r = fround(v286 + v300);
+  const v301 = fround(Cus32 * sin2phi);
+  const v302 = fround(Cuc32 * cos2phi);
+  const v303 = fround(v301 + v302);
+  const v304 = fround(v303 * v303);
+  const v305 = fround(v304 * -0.5);
+  const v306 = fround(1 + v305);
+  const v307 = fround(cosphi * v306);
+  const v308 = fround(v303 * v304);
+  const v309 = fround(v308 * -0.1666666716337204);
+  const v310 = fround(v303 + v309);
+  const v311 = fround(sinphi * v310);
+  const cosu = fround(v307 - v311);
+  const xOrbit = fround(r * cosu);
+  const v312 = fround(v18432 * t32);
+  const v313 = fround(v312 * v312);
+  const v314 = fround(v313 * 0.000024801587642286904);
+  const v315 = fround(-0.0013888889225199819 + v314);
+  const v316 = fround(v313 * v315);
+  const v317 = fround(0.0416666679084301 + v316);
+  const v318 = fround(v313 * v317);
+  const v319 = fround(-0.5 + v318);
+  const v320 = fround(v313 * v319);
+  const v321 = fround(1 + v320);
+  const v322 = fround(v18332 * v321);
+  const v323 = fround(v312 * v313);
+  const v324 = fround(v313 * 0.0000027557318844628753);
+  const v325 = fround(-0.00019841270113829523 + v324);
+  const v326 = fround(v313 * v325);
+  const v327 = fround(0.008333333767950535 + v326);
+  const v328 = fround(v313 * v327);
+  const v329 = fround(-0.1666666716337204 + v328);
+  const v330 = fround(v323 * v329);
+  const v331 = fround(v312 + v330);
+  const v332 = fround(v18632 * v331);
+  const cosOmega = fround(v322 - v332);
+  const v333 = fround(xOrbit * cosOmega);
+  const v334 = fround(sinphi * v306);
+  const v335 = fround(cosphi * v310);
+  const sinu = fround(v334 + v335);
+  const yOrbit = fround(r * sinu);
+  const v336 = fround(IDOT32 * t32);
+  const v337 = fround(Cis32 * sin2phi);
+  const v338 = fround(v336 + v337);
+  const v339 = fround(Cic32 * cos2phi);
+  const v340 = fround(v338 + v339);
+  const v341 = fround(v340 * v340);
+  const v342 = fround(v341 * -0.5);
+  const v343 = fround(1 + v342);
+  const v344 = fround(v20532 * v343);
+  const v345 = fround(v340 * v341);
+  const v346 = fround(v345 * -0.1666666716337204);
+  const v347 = fround(v340 + v346);
+  const v348 = fround(v22432 * v347);
+  const cosi = fround(v344 - v348);
+  const v349 = fround(yOrbit * cosi);
+  const v350 = fround(v18632 * v321);
+  const v351 = fround(v18332 * v331);
+  const sinOmega = fround(v350 + v351);
+  const v352 = fround(v349 * sinOmega);
+  const v353 = fround(v333 - v352);
+  const v354 = fround(xOrbit * sinOmega);
+  const v355 = fround(v349 * cosOmega);
+  const v356 = fround(v354 + v355);
+  const v357 = fround(v22432 * v343);
+  const v358 = fround(v20532 * v347);
+  const sini = fround(v357 + v358);
+  const v359 = fround(yOrbit * sini);
+  out[0] = v353;
+  out[1] = v356;
+  out[2] = v359;
+  return 0;
+}

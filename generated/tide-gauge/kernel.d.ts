@@ -1,0 +1,47 @@
+/** Generated file, do not edit. Elements that setup takes. */
+export interface Elements {
+  /** m^(1/2), [5150, 5160] */
+  readonly sqrtA: number;
+  /** 1, [0, 0.03] */
+  readonly e: number;
+  /** rad, [0.9, 1.02] */
+  readonly i0: number;
+  /** rad, [-3.141592653589793, 3.141592653589793] */
+  readonly Omega0: number;
+  /** rad, [-3.141592653589793, 3.141592653589793] */
+  readonly omega: number;
+  /** rad, [-3.141592653589793, 3.141592653589793] */
+  readonly M0: number;
+  /** rad/s, [-1.1703344634137303e-8, 1.1703344634137303e-8] */
+  readonly deltaN: number;
+  /** rad/s, [-2.925836158534326e-9, 2.925836158534326e-9] */
+  readonly IDOT: number;
+  /** rad/s, [-1e-8, -6e-9] */
+  readonly OmegaDot: number;
+  /** rad, [-0.00006103515625, 0.00006103515625] */
+  readonly Cuc: number;
+  /** rad, [-0.00006103515625, 0.00006103515625] */
+  readonly Cus: number;
+  /** m, [-1024, 1024] */
+  readonly Crc: number;
+  /** m, [-1024, 1024] */
+  readonly Crs: number;
+  /** rad, [-0.00006103515625, 0.00006103515625] */
+  readonly Cic: number;
+  /** rad, [-0.00006103515625, 0.00006103515625] */
+  readonly Cis: number;
+  /** s, [0, 604784] */
+  readonly toe: number;
+}
+
+/** 0 good; 1 element outside its range or state not filled; 2 time outside its span; 3 not a finite number. */
+export type Status = 0 | 1 | 2 | 3;
+
+/** Words of the state array. */
+export declare const stateWords: 21;
+
+/** Prepares the state of one satellite. */
+export declare function setup(elements: Elements, state: Float64Array): Status;
+
+/** Predicts at one epoch: out[0] position x in m, out[1] position y in m, out[2] position z in m. */
+export declare function position(t: number, state: Float64Array, out: Float64Array | number[]): Status;

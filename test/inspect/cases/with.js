@@ -1,0 +1,7 @@
+function scoped(o) {
+  with (o) return x;
+//^ inspect.with
+}
+function plain(o) {
+  return o.with;
+}
