@@ -38,13 +38,8 @@ export type Progress = (what: string, share: number) => void;
 export async function choose(task: Task, budget: Budget, progress: Progress): Promise<readonly Trial[]> {
   const trials: Trial[] = [];
   for (const [choices, variant] of inOrderOfCost(task, budget)) {
-    const sizes = await sizeExcesses(variant, budget);
-    if (sizes.length > 0) {
-      trials.push({ choices, variant, observed: [], excesses: sizes });
-      continue;
-    }
     const first = await look(task, variant, FIRST_LOOK, () => {});
-    const early = errorExcesses(first, budget);
+    const early = [...(await sizeExcesses(variant, budget)), ...errorExcesses(first, budget)];
     if (early.length > 0) {
       trials.push({ choices, variant, observed: first, excesses: early });
       continue;

@@ -68,6 +68,7 @@ function worstToJson({ worst }: Comparison): unknown {
 
 function toTable(comparison: Comparison, search: SuspectSearch): string {
   const { worst } = comparison;
+  const { record } = worst;
   const columns: readonly (readonly [string, string])[] = [
     ['system', 'GPS'],
     ['message', 'LNAV'],
@@ -89,7 +90,7 @@ function toTable(comparison: Comparison, search: SuspectSearch): string {
     '',
     'Broadcast minus precise, all points as computed.',
     ...(velocity === undefined ? [] : [`Velocity: RMS ${(velocity * 1e3).toFixed(3)} mm/s.`]),
-    `Worst: ${metres(worst.error.total)} m at ${toIso(worst.time)}, ${nameOf(worst.record)}, line ${worst.record.line}.`,
+    `Worst: ${metres(worst.error.total)} m at ${toIso(worst.time)}, ${nameOf(record)}, line ${record.line}.`,
     suspectLine(search),
   ];
   return `${lines.join('\n')}\n`;
@@ -106,11 +107,11 @@ function suspectLine({ limit, suspects, others }: SuspectSearch): string {
 }
 
 function suspectFinding(file: string, { limit = 0 }: SuspectSearch): (suspect: Suspect) => Finding {
-  return ({ record, comparison }) => ({
+  return ({ record, comparison: { points, rms, worst } }) => ({
     code: 'evaluate.suspect',
     place: { file, line: record.line },
-    what: `${nameOf(record)} is off by up to ${metres(comparison.worst.error.total)} m (RMS ${metres(comparison.rms)} m over ${comparison.points} points)`,
-    why: `The spread of all records puts the limit at ${metres(limit)} m: median and fifteen robust standard deviations.`,
+    what: `${nameOf(record)} is off by up to ${metres(worst.error.total)} m, RMS of ${points} points ${metres(rms)} m`,
+    why: `Median and fifteen robust standard deviations of all records put the limit at ${metres(limit)} m.`,
     remedy: 'Remove the record, or look for a manoeuvre if its neighbours drift as well.',
   });
 }

@@ -22,11 +22,12 @@ export function report(findings: readonly Finding[]): void {
 export function contradictionFindings({ file, contradictions }: EvaluateJob): Finding[] {
   return contradictions.map(({ variants, fields }) => {
     const [first, ...others] = variants;
+    const lines = others.map((other) => other.line).join(', ');
     return {
       code: 'evaluate.contradiction',
       place: { file, line: first.line },
-      what: `${nameOf(first)} has other values at line ${others.map((other) => other.line).join(', ')}: ${fields.join(', ')}`,
-      why: 'Satellite, toe and issue of data name one set of values, so all but one of these records are wrong.',
+      what: `${nameOf(first)} has other values at line ${lines}: ${fields.join(', ')}`,
+      why: 'Satellite, toe and issue of data name one set of values: all but one of these records are wrong.',
       remedy: 'Compare with a precise orbit or with the neighbouring records and remove the wrong one.',
     };
   });

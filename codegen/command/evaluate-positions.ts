@@ -15,7 +15,9 @@ import {
   unhealthyNotes,
 } from './evaluate-job.ts';
 
-/** Times to evaluate at: each record's toe, given epochs, or steps of so many seconds from first to last toe. */
+/**
+ * Times to evaluate at: each record's toe, given epochs, or steps of so many seconds from first to last toe.
+ */
 export type Times =
   | { readonly kind: 'toe' }
   | { readonly kind: 'at'; readonly epochs: readonly GnssTime[] }
@@ -33,10 +35,24 @@ interface Row {
 /** Text is handed to stdout in pieces of about this length, so that a long output is never held whole. */
 const PIECE = 1 << 16;
 
-const HEAD = `${'GPS time'.padEnd(19)}  sat  IODE     line        tk s              x m              y m              z m           clock s
-`;
+/** Widths of the columns: numbers are set to the right, time and satellite to the left. */
+const COLUMNS: readonly (readonly [string, number])[] = [
+  ['GPS time', -19],
+  ['sat', -3],
+  ['IODE', 4],
+  ['line', 7],
+  ['tk s', 10],
+  ['x m', 14],
+  ['y m', 14],
+  ['z m', 14],
+  ['clock s', 17],
+];
 
-/** Prints positions and clock offsets, and names satellites that are unhealthy or have no record for a time. */
+const HEAD: string = tableLine(COLUMNS.map(([head]) => head));
+
+/**
+ * Prints positions and clock offsets, and names satellites that are unhealthy or have no record for a time.
+ */
 export function evaluatePositions(job: EvaluateJob, times: Times): 0 | 1 {
   const satellites = new Map([...groupBy(job.records, (record) => record.satellite)].sort());
   const gaps = new Map<string, number>();
@@ -59,7 +75,7 @@ function* rowsOf(
 ): Generator<Row> {
   if (times.kind === 'toe') {
     const healthy = [...satellites.values()].flat().filter((record) => record.health === 0);
-    const sorted = healthy.toSorted((a, b) => secondsBetween(b.toe, a.toe)); // stable: satellites stay in order
+    const sorted = healthy.toSorted((a, b) => secondsBetween(b.toe, a.toe)); // stable
     for (const record of sorted) yield rowOf(record, record.toe);
     return;
   }
@@ -118,16 +134,23 @@ function print(
 function rowToText(row: Row): string {
   const { record } = row;
   const { x, y, z } = row.position;
-  const cells = [
+  return tableLine([
     toIso(row.time),
     record.satellite,
-    String(record.iode).padStart(5),
-    String(record.line).padStart(7),
-    row.tk.toFixed(3).padStart(10),
-    ...[x, y, z].map((metres) => metres.toFixed(4).padStart(15)),
-    row.clock.toFixed(14).padStart(16),
-  ];
-  return `${cells.join('  ')}\n`;
+    String(record.iode),
+    String(record.line),
+    row.tk.toFixed(3),
+    ...[x, y, z].map((metres) => metres.toFixed(4)),
+    row.clock.toFixed(14),
+  ]);
+}
+
+function tableLine(cells: readonly string[]): string {
+  const padded = COLUMNS.map(([, width], index) => {
+    const cell = cells[index] ?? '';
+    return width < 0 ? cell.padEnd(-width) : cell.padStart(width);
+  });
+  return `${padded.join('  ')}\n`;
 }
 
 function rowToJson(row: Row): string {

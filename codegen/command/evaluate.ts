@@ -11,19 +11,22 @@ import { evaluatePositions, type Times } from './evaluate-positions.ts';
 
 const help = `bound-orbit evaluate station.rnx --at 2022-01-01T06:00:00 --satellite G07
 
-Positions and clock offsets from the GPS LNAV records of a RINEX navigation file (versions 2, 3 and 4), computed with
-the reference model: Earth-fixed metres of the antenna phase centre, seconds for a single-frequency user of L1.
+Positions and clock offsets from the GPS LNAV records of a RINEX navigation file (versions 2, 3, 4),
+computed with the reference model: Earth-fixed metres of the antenna phase centre, and seconds for a
+single-frequency user of L1.
 
-  --at EPOCH        GPS time, such as 2022-01-01T06:00:00; may be given again; without it and without --every each
-                    record is evaluated at its own toe
+  --at EPOCH        GPS time, such as 2022-01-01T06:00:00; may be given again; without it and
+                    without --every each record is evaluated at its own toe
   --every SECONDS   from the first toe of the file to the last
   --satellite G07   this satellite alone
   --against SP3     compare with a precise orbit (SP3-a, c or d, in GPS time) at the epochs of that file
   --json            JSON on stdout
 
-At a time the healthy record with the nearest toe is used, within its fit interval; with --against, within an hour.
-Against a precise orbit: broadcast minus precise, along the radius, along the track and across the orbital plane.
-All points count. A record far outside the spread of the others, and records that share satellite, toe and issue of
+At a time the healthy record with the nearest toe is used, within its fit interval; with --against,
+within an hour. Against a precise orbit: broadcast minus precise, along the radius, along the track
+and across the orbital plane; all points count.
+
+A record far outside the spread of the others, and records that share satellite, toe and issue of
 data but not their values, are named on stderr, and the exit code is 1.
 `;
 

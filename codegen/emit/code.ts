@@ -1,5 +1,4 @@
-import type { Stage } from '../formula/node.ts';
-import type { Kernel } from '../kernel/kernel.ts';
+import type { Kernel, Line } from '../kernel/kernel.ts';
 import { type Claims, documentation } from './documentation.ts';
 import { expression, literal, operand } from './expression.ts';
 
@@ -40,22 +39,41 @@ export function emitCode(kernel: Kernel, claims: Claims): string {
   ].join('\n');
 }
 
-/** Reads one element and checks its range; the difference of a number with itself is 0 only when it is finite. */
+/** Reads one element and checks its range. */
 function readElement(kernel: Kernel, name: string): readonly string[] {
-  const { min, max } = kernel.domain[name]!;
-  return [
-    `  const ${name} = elements.${name};`,
-    `  if (!(${name} >= ${literal(min)} && ${name} <= ${literal(max)})) return ${name} - ${name} === 0 ? 1 : 3;`,
-  ];
+  const input = kernel.lines.findIndex((line) => line.stage === 'setup' && line.operation === 'input' && line.name === name);
+  return [`  const ${name} = elements.${name};`, ...checkRange(kernel, input, 1)];
 }
 
 function checkTime(kernel: Kernel): readonly string[] {
-  const { min, max } = kernel.domain['t']!;
-  return [`  if (!(t >= ${literal(min)} && t <= ${literal(max)})) return t - t === 0 ? 2 : 3;`];
+  return checkRange(kernel, kernel.lines.findIndex((line) => line.stage === 'tick' && line.operation === 'input'), 2);
 }
 
-function assignments(kernel: Kernel, stage: Stage): readonly string[] {
+/**
+ * Checks the range of an input as its stage carries it: in a float32 stage the rounded value against the rounded
+ * range, which every value of the range passes. The difference of a number with itself is 0 only when it is finite.
+ */
+function checkRange(kernel: Kernel, input: number, status: 1 | 2): readonly string[] {
+  const { name, stage } = kernel.lines[input]!;
+  const { min, max } = kernel.domain[name]!;
+  const rounded = roundedInput(kernel, input);
+  const check = (value: string, bound: (x: number) => string, finite: string) =>
+    `  if (!(${value} >= ${bound(min)} && ${value} <= ${bound(max)})) return ${finite} === 0 ? ${status} : 3;`;
+  if (rounded === undefined || kernel.choices[stage as 'setup' | 'tick'] === 'f64') return [check(name, literal, `${name} - ${name}`)];
+  return [
+    `  const ${rounded.name} = fround(${name});`,
+    check(rounded.name, (x) => literal(Math.fround(x)), `fround(${rounded.name} - ${rounded.name})`),
+  ];
+}
+
+/** The line that rounds an input to float32, if there is one. */
+function roundedInput(kernel: Kernel, input: number): Line | undefined {
+  return kernel.lines.find((line) => line.operation === 'round' && line.args[0] === input);
+}
+
+function assignments(kernel: Kernel, stage: 'setup' | 'tick'): readonly string[] {
+  const checked = (line: Line) => line.operation === 'round' && kernel.choices[stage] === 'f32' && kernel.lines[line.args[0]!]!.operation === 'input';
   return kernel.lines
-    .filter((line) => line.stage === stage && line.operation !== 'input')
+    .filter((line) => line.stage === stage && line.operation !== 'input' && !checked(line))
     .map((line) => `  const ${line.name} = ${expression(kernel, line)};`);
 }

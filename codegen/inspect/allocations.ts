@@ -88,6 +88,7 @@ export function allocationFaults(unit: Unit, fn: OwnFunction): Fault[] {
       if (!ts.isClassLike(node.parent)) add(closure, node, 'a function is created inside a function');
     } else if (ts.isClassLike(node)) add(classInFunction, node, 'a class is created inside a function');
     else if (ts.isBigIntLiteral(node)) add(boxedValue, node, 'a bigint literal');
+    else if (isBigArithmetic(unit, node)) add(boxedValue, node, 'bigint arithmetic');
     else if (ts.isRegularExpressionLiteral(node))
       add(regularExpression, node, 'a regular expression literal');
     else if (ts.isParameter(node) && node.dotDotDotToken !== undefined) {
@@ -97,6 +98,12 @@ export function allocationFaults(unit: Unit, fn: OwnFunction): Fault[] {
     }
   });
   return faults;
+}
+
+/** True for an operator whose result is known to be a bigint. */
+export function isBigArithmetic(unit: Unit, node: ts.Node): boolean {
+  if (!ts.isBinaryExpression(node) || node.operatorToken.kind === ts.SyntaxKind.EqualsToken) return false;
+  return (unit.checker.getTypeAtLocation(node).flags & ts.TypeFlags.BigIntLike) !== 0;
 }
 
 function addConstruction(

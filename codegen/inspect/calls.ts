@@ -5,7 +5,7 @@ import type { Fault, Rule } from './fault.ts';
 import type { OwnFunction } from './functions.ts';
 import { evaluation } from './hazards.ts';
 import { stringBuilding } from './strings.ts';
-import { isAssignment, walkOwn } from './syntax.ts';
+import { isAssignment, isUsing, walkOwn } from './syntax.ts';
 import type { Unit } from './unit.ts';
 
 export const engineFunction: Rule = {
@@ -33,6 +33,8 @@ export function callFaults(unit: Unit, fn: OwnFunction): Fault[] {
     if (ts.isCallExpression(node)) {
       const fault = callFault(unit, node);
       if (fault !== undefined) faults.push(fault);
+    } else if (isUsing(node)) {
+      faults.push({ rule: outsideCall, at: node, what: 'using calls a method when its block ends' });
     } else if (isPower(node)) {
       faults.push({ rule: engineFunction, at: node, what: 'the operator ** is computed by the engine' });
     }

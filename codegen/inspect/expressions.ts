@@ -1,4 +1,5 @@
 import { ts } from 'ts-morph';
+import { isBigArithmetic } from './allocations.ts';
 import { calleeOf } from './callees.ts';
 import type { OwnFunction } from './functions.ts';
 import { fromCounts, none, type OperationKind, type Operations, sum, worse } from './operations.ts';
@@ -116,7 +117,8 @@ function countUpdate(
 
 function countBinary(context: CountContext, node: ts.BinaryExpression): Operations {
   const operator = node.operatorToken.kind;
-  const kind = isConcatenation(context.unit, node) ? undefined : binaryKinds.get(operator);
+  const isBoxed = isConcatenation(context.unit, node) || isBigArithmetic(context.unit, node);
+  const kind = isBoxed ? undefined : binaryKinds.get(operator);
   if (kind === undefined && !freeOperators.has(operator)) context.uncounted();
   const left = isAssignment(node)
     ? countTarget(context, node.left, operator !== ts.SyntaxKind.EqualsToken)

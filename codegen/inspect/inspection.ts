@@ -81,8 +81,8 @@ export function inspectSource(fileName: string, text: string, options: InspectOp
 function inspectUnit(unit: Unit, options: InspectOptions): Inspection {
   const functions = [...unit.functions.values()];
   const graph = callGraph(unit);
-  const variables = float32Variables(unit);
   const float32 = float32Functions(unit, graph, options.float32 ?? []);
+  const variables = float32.size === 0 ? new Set<never>() : float32Variables(unit);
   const circles = recursionFaults(graph);
   const own = new Map(
     functions.map((fn) => [

@@ -30,30 +30,37 @@ export function nameFaults(unit: Unit, fn: OwnFunction): Fault[] {
     if (same === undefined) byName.set(declared.name.text, [declared]);
     else same.push(declared);
   }
-  const faults: Fault[] = [];
-  for (const declared of byName.values()) {
-    const inner = declared.filter(({ scope }) => scope !== fn.node);
-    for (const one of inner) {
-      const outer = declared.find((other) => other.scope !== one.scope && encloses(other.scope, one.scope));
-      const use = outer === undefined ? foreignUse(unit, fn, one) : undefined;
-      const other = outer?.name ?? use;
-      if (other === undefined) continue;
-      const what = `${one.name.text} names something else in line ${lineOf(other)} of the same function`;
-      faults.push({ rule: shadowedName, at: one.name, what });
+  return [...byName.values()].flatMap((declared) => [
+    ...shadowings(unit, fn, declared),
+    ...redeclarations(declared),
+  ]);
+}
+
+/** @param declared all declarations of one name in the function */
+function shadowings(unit: Unit, fn: OwnFunction, declared: readonly Declared[]): Fault[] {
+  const inner = declared.filter(({ scope }) => scope !== fn.node);
+  return inner.flatMap((one) => {
+    const outer = declared.find((other) => other.scope !== one.scope && encloses(other.scope, one.scope));
+    const other = outer?.name ?? foreignUse(unit, fn, one);
+    if (other === undefined) return [];
+    const what = `${one.name.text} names something else in line ${lineOf(other)} of the same function`;
+    return [{ rule: shadowedName, at: one.name, what }];
+  });
+}
+
+/** @param declared all declarations of one name in the function */
+function redeclarations(declared: readonly Declared[]): Fault[] {
+  const first = new Map<ts.Node, ts.Identifier>();
+  return declared.flatMap(({ name, scope }) => {
+    const earlier = first.get(scope);
+    if (earlier === undefined) {
+      first.set(scope, name);
+      return [];
     }
-    const seen = new Map<ts.Node, ts.Identifier>();
-    for (const { name, scope } of declared) {
-      const first = seen.get(scope);
-      if (first === undefined) seen.set(scope, name);
-      else
-        faults.push({
-          rule: redeclaredName,
-          at: name,
-          what: `${name.text} is declared in line ${lineOf(first)} already`,
-        });
-    }
-  }
-  return faults;
+    return [
+      { rule: redeclaredName, at: name, what: `${name.text} is declared in line ${lineOf(earlier)} already` },
+    ];
+  });
 }
 
 function declaredNames(fn: OwnFunction): Declared[] {

@@ -2,7 +2,7 @@ import { ts } from 'ts-morph';
 import { type CountContext, countExpression } from './expressions.ts';
 import { countLoop } from './loops.ts';
 import { fromCounts, none, type Operations, sum, times, worse } from './operations.ts';
-import { isErased } from './syntax.ts';
+import { isErased, isUsing } from './syntax.ts';
 
 /**
  * The worst counts of a statement by the way it is left: '' is falling through to the next statement, 'return' ends
@@ -111,6 +111,7 @@ function sequence(context: CountContext, statements: readonly ts.Statement[]): E
 }
 
 function countDeclarations(context: CountContext, list: ts.VariableDeclarationList): Operations {
+  if (isUsing(list)) context.uncounted();
   return sum(
     ...list.declarations.flatMap(({ name, initializer }) => [
       initializer === undefined ? none : countExpression(context, initializer),

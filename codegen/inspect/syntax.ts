@@ -98,6 +98,11 @@ export function isAssignment(node: ts.Node): node is ts.AssignmentExpression<ts.
   );
 }
 
+/** True for `using` and `await using` declarations, which call a method of the value when their block ends. */
+export function isUsing(node: ts.Node): boolean {
+  return ts.isVariableDeclarationList(node) && (node.flags & ts.NodeFlags.Using) !== 0;
+}
+
 /** True for `++` and `--`, before or after their operand. */
 export function isUpdate(node: ts.Node): node is ts.PrefixUnaryExpression | ts.PostfixUnaryExpression {
   return (

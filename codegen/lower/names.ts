@@ -21,6 +21,9 @@ export function nameLines(formula: Formula, lines: readonly Line[]): readonly Li
 
 function nameOf(line: Line, labels: ReadonlyMap<Node, string>, names: readonly string[], take: (wish: string | undefined) => string): string {
   if (line.operation === 'input') return line.node.name;
-  if (line.operation === 'round') return take(`${names[line.args[0]!]}32`);
+  if (line.operation === 'round') {
+    const wide = names[line.args[0]!]!;
+    return take(/^v\d+$/.test(wide) ? undefined : `${wide}32`);
+  }
   return take(labels.get(line.node));
 }

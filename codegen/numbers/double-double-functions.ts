@@ -2,8 +2,8 @@ import { add, div, mul, Pairs, product, set, sub } from './double-double.ts';
 import { offsetGuess } from './kepler-guess.ts';
 
 /**
- * Elementary functions of pairs; with u = 2^-53, relative errors of sine, cosine and atan2 stay below 16 u^2
- * (2e-31) for angles up to 2^20 rad, taken as the exact sum of their words. Checked by sampling, not
+ * Elementary functions of pairs; with u = 2^-53, relative errors of sine, cosine and atan2 stay below 8 u^2
+ * (1e-31; seen 2.4 u^2) for angles up to 2^20 rad, taken as the exact sum of their words. Checked by sampling, not
  * proven: this is the yardstick for observed errors, never part of a certified bound.
  */
 
@@ -161,7 +161,7 @@ export function atan2(r: Pairs, d: number, y: number, x: number): void {
  * Newton's iteration from a float64 guess; it ends once the step is so small that its square is out of sight,
  * or, for e next to 1, once steps shrink no more.
  *
- * With E = M + D the error is about 4 u^2 e / (1 - e cos E), the equation's own condition: 1e-30 for e = 0.99.
+ * The error is below 8 u^2 e / (1 - e cos E), E = M + D (seen 1.8): 1e-31 e for small e, 1e-29 for e = 0.99 near M = 0.
  *
  * @throws RangeError unless 0 <= r[e] < 1
  */

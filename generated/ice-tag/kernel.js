@@ -20,61 +20,74 @@ export const stateWords = 21;
  *   sqrtA [5150, 5160] m^(1/2)
  *   e [0, 0.03] 1
  *   i0 [0.9, 1.02] rad
- *   Omega0 [-3.141592653589793, 3.141592653589793] rad
- *   omega [-3.141592653589793, 3.141592653589793] rad
- *   M0 [-3.141592653589793, 3.141592653589793] rad
- *   deltaN [-1.1703344634137303e-8, 1.1703344634137303e-8] rad/s
- *   IDOT [-2.925836158534326e-9, 2.925836158534326e-9] rad/s
+ *   Omega0 [-3.1415926536, 3.1415926536] rad
+ *   omega [-3.1415926536, 3.1415926536] rad
+ *   M0 [-3.1415926536, 3.1415926536] rad
+ *   deltaN [-1.1703344634254336e-8, 1.1702987476520137e-8] rad/s
+ *   IDOT [-2.925836158563584e-9, 2.925479000829385e-9] rad/s
  *   OmegaDot [-1e-8, -6e-9] rad/s
- *   Cuc [-0.00006103515625, 0.00006103515625] rad
- *   Cus [-0.00006103515625, 0.00006103515625] rad
- *   Crc [-1024, 1024] m
- *   Crs [-1024, 1024] m
- *   Cic [-0.00006103515625, 0.00006103515625] rad
- *   Cis [-0.00006103515625, 0.00006103515625] rad
+ *   Cuc [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Cus [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Crc [-1024.00000001024, 1023.9687500102397] m
+ *   Crs [-1024.00000001024, 1023.9687500102397] m
+ *   Cic [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Cis [-0.00006103515625061035, 0.0000610332936054611] rad
  *   toe [0, 604784] s
- * @param state Float32Array of stateWords words, written
+ * @param {Float32Array} state stateWords words, written
  * @returns 0 good; 1 an element outside its range; 3 an element that is not a finite number.
  *   After any other status than 0 the state is void, and position returns 1.
  */
 export function setup(elements, state) {
   state[0] = 0;
   const sqrtA = elements.sqrtA;
-  if (!(sqrtA >= 5150 && sqrtA <= 5160)) return sqrtA - sqrtA === 0 ? 1 : 3;
-  const e = elements.e;
-  if (!(e >= 0 && e <= 0.03)) return e - e === 0 ? 1 : 3;
-  const i0 = elements.i0;
-  if (!(i0 >= 0.9 && i0 <= 1.02)) return i0 - i0 === 0 ? 1 : 3;
-  const Omega0 = elements.Omega0;
-  if (!(Omega0 >= -3.141592653589793 && Omega0 <= 3.141592653589793)) return Omega0 - Omega0 === 0 ? 1 : 3;
-  const omega = elements.omega;
-  if (!(omega >= -3.141592653589793 && omega <= 3.141592653589793)) return omega - omega === 0 ? 1 : 3;
-  const M0 = elements.M0;
-  if (!(M0 >= -3.141592653589793 && M0 <= 3.141592653589793)) return M0 - M0 === 0 ? 1 : 3;
-  const deltaN = elements.deltaN;
-  if (!(deltaN >= -1.1703344634137303e-8 && deltaN <= 1.1703344634137303e-8)) return deltaN - deltaN === 0 ? 1 : 3;
-  const IDOT = elements.IDOT;
-  if (!(IDOT >= -2.925836158534326e-9 && IDOT <= 2.925836158534326e-9)) return IDOT - IDOT === 0 ? 1 : 3;
-  const OmegaDot = elements.OmegaDot;
-  if (!(OmegaDot >= -1e-8 && OmegaDot <= -6e-9)) return OmegaDot - OmegaDot === 0 ? 1 : 3;
-  const Cuc = elements.Cuc;
-  if (!(Cuc >= -0.00006103515625 && Cuc <= 0.00006103515625)) return Cuc - Cuc === 0 ? 1 : 3;
-  const Cus = elements.Cus;
-  if (!(Cus >= -0.00006103515625 && Cus <= 0.00006103515625)) return Cus - Cus === 0 ? 1 : 3;
-  const Crc = elements.Crc;
-  if (!(Crc >= -1024 && Crc <= 1024)) return Crc - Crc === 0 ? 1 : 3;
-  const Crs = elements.Crs;
-  if (!(Crs >= -1024 && Crs <= 1024)) return Crs - Crs === 0 ? 1 : 3;
-  const Cic = elements.Cic;
-  if (!(Cic >= -0.00006103515625 && Cic <= 0.00006103515625)) return Cic - Cic === 0 ? 1 : 3;
-  const Cis = elements.Cis;
-  if (!(Cis >= -0.00006103515625 && Cis <= 0.00006103515625)) return Cis - Cis === 0 ? 1 : 3;
-  const toe = elements.toe;
-  if (!(toe >= 0 && toe <= 604784)) return toe - toe === 0 ? 1 : 3;
   const sqrtA32 = fround(sqrtA);
-  const A = fround(sqrtA32 * sqrtA32);
+  if (!(sqrtA32 >= 5150 && sqrtA32 <= 5160)) return fround(sqrtA32 - sqrtA32) === 0 ? 1 : 3;
+  const e = elements.e;
   const e32 = fround(e);
+  if (!(e32 >= 0 && e32 <= 0.029999999329447746)) return fround(e32 - e32) === 0 ? 1 : 3;
+  const i0 = elements.i0;
+  const i032 = fround(i0);
+  if (!(i032 >= 0.8999999761581421 && i032 <= 1.0199999809265137)) return fround(i032 - i032) === 0 ? 1 : 3;
+  const Omega0 = elements.Omega0;
+  const Omega032 = fround(Omega0);
+  if (!(Omega032 >= -3.1415927410125732 && Omega032 <= 3.1415927410125732)) return fround(Omega032 - Omega032) === 0 ? 1 : 3;
+  const omega = elements.omega;
+  const omega32 = fround(omega);
+  if (!(omega32 >= -3.1415927410125732 && omega32 <= 3.1415927410125732)) return fround(omega32 - omega32) === 0 ? 1 : 3;
+  const M0 = elements.M0;
   const M032 = fround(M0);
+  if (!(M032 >= -3.1415927410125732 && M032 <= 3.1415927410125732)) return fround(M032 - M032) === 0 ? 1 : 3;
+  const deltaN = elements.deltaN;
+  const deltaN32 = fround(deltaN);
+  if (!(deltaN32 >= -1.1703344959812512e-8 && deltaN32 <= 1.1702987912087792e-8)) return fround(deltaN32 - deltaN32) === 0 ? 1 : 3;
+  const IDOT = elements.IDOT;
+  const IDOT32 = fround(IDOT);
+  if (!(IDOT32 >= -2.925836239953128e-9 && IDOT32 <= 2.9254789701838035e-9)) return fround(IDOT32 - IDOT32) === 0 ? 1 : 3;
+  const OmegaDot = elements.OmegaDot;
+  const OmegaDot32 = fround(OmegaDot);
+  if (!(OmegaDot32 >= -9.99999993922529e-9 && OmegaDot32 <= -6.000000052353016e-9)) return fround(OmegaDot32 - OmegaDot32) === 0 ? 1 : 3;
+  const Cuc = elements.Cuc;
+  const Cuc32 = fround(Cuc);
+  if (!(Cuc32 >= -0.00006103515625 && Cuc32 <= 0.00006103329360485077)) return fround(Cuc32 - Cuc32) === 0 ? 1 : 3;
+  const Cus = elements.Cus;
+  const Cus32 = fround(Cus);
+  if (!(Cus32 >= -0.00006103515625 && Cus32 <= 0.00006103329360485077)) return fround(Cus32 - Cus32) === 0 ? 1 : 3;
+  const Crc = elements.Crc;
+  const Crc32 = fround(Crc);
+  if (!(Crc32 >= -1024 && Crc32 <= 1023.96875)) return fround(Crc32 - Crc32) === 0 ? 1 : 3;
+  const Crs = elements.Crs;
+  const Crs32 = fround(Crs);
+  if (!(Crs32 >= -1024 && Crs32 <= 1023.96875)) return fround(Crs32 - Crs32) === 0 ? 1 : 3;
+  const Cic = elements.Cic;
+  const Cic32 = fround(Cic);
+  if (!(Cic32 >= -0.00006103515625 && Cic32 <= 0.00006103329360485077)) return fround(Cic32 - Cic32) === 0 ? 1 : 3;
+  const Cis = elements.Cis;
+  const Cis32 = fround(Cis);
+  if (!(Cis32 >= -0.00006103515625 && Cis32 <= 0.00006103329360485077)) return fround(Cis32 - Cis32) === 0 ? 1 : 3;
+  const toe = elements.toe;
+  const toe32 = fround(toe);
+  if (!(toe32 >= 0 && toe32 <= 604784)) return fround(toe32 - toe32) === 0 ? 1 : 3;
+  const A = fround(sqrtA32 * sqrtA32);
   const v1 = fround(M032 * 0.6366197466850281);
   const v2 = fround(v1 + 0.5);
   const v3 = Math.floor(v2);
@@ -122,15 +135,12 @@ export function setup(elements, state) {
   const v45 = fround(v44 * A);
   const v46 = fround(398600513257472 / v45);
   const n0 = fround(Math.sqrt(v46));
-  const deltaN32 = fround(deltaN);
   const n = fround(n0 + deltaN32);
   const v47 = v7 < 0.5 ? v33 : v24;
   const v48 = fround(v47 * v40);
-  const Crs32 = fround(Crs);
   const v49 = fround(e32 * e32);
   const v50 = fround(1 - v49);
   const v51 = fround(Math.sqrt(v50));
-  const omega32 = fround(omega);
   const v52 = fround(omega32 * 0.6366197466850281);
   const v53 = fround(v52 + 0.5);
   const v54 = Math.floor(v53);
@@ -178,11 +188,6 @@ export function setup(elements, state) {
   const v95 = v58 < 0.5 ? v84 : v75;
   const sinomega = fround(v95 * v91);
   const v96 = fround(v51 * sinomega);
-  const Crc32 = fround(Crc);
-  const Cus32 = fround(Cus);
-  const Cuc32 = fround(Cuc);
-  const Omega032 = fround(Omega0);
-  const toe32 = fround(toe);
   const v97 = fround(0.00007292115333257243 * toe32);
   const v98 = fround(Omega032 - v97);
   const v99 = fround(v98 * 0.6366197466850281);
@@ -228,11 +233,9 @@ export function setup(elements, state) {
   const v139 = -v138;
   const v140 = v105 < 0.5 ? v138 : v139;
   const v141 = fround(v132 * v140);
-  const OmegaDot32 = fround(OmegaDot);
   const v142 = fround(OmegaDot32 - 0.00007292115333257243);
   const v143 = v105 < 0.5 ? v131 : v122;
   const v144 = fround(v143 * v138);
-  const i032 = fround(i0);
   const v145 = fround(i032 * i032);
   const v146 = fround(v145 * -2.755731998149713e-7);
   const v147 = fround(0.000024801587642286904 + v146);
@@ -244,9 +247,6 @@ export function setup(elements, state) {
   const v153 = fround(-0.5 + v152);
   const v154 = fround(v145 * v153);
   const v155 = fround(1 + v154);
-  const IDOT32 = fround(IDOT);
-  const Cis32 = fround(Cis);
-  const Cic32 = fround(Cic);
   const v156 = fround(i032 * v145);
   const v157 = fround(v145 * -2.5052107943679403e-8);
   const v158 = fround(0.0000027557318844628753 + v157);
@@ -286,7 +286,7 @@ export function setup(elements, state) {
  * Predicts at one epoch, in the same operations for every input.
  *
  * @param t time since the reference epoch of the elements, s, in [-7200, 7200]
- * @param state Float32Array that setup filled
+ * @param {Float32Array} state the words that setup wrote
  * @param out array of numbers, written only with status 0:
  *   out[0] position x, m
  *   out[1] position y, m
@@ -294,7 +294,8 @@ export function setup(elements, state) {
  * @returns 0 good; 1 a state that setup did not fill; 2 t outside its span; 3 t not a finite number.
  */
 export function position(t, state, out) {
-  if (!(t >= -7200 && t <= 7200)) return t - t === 0 ? 2 : 3;
+  const t32 = fround(t);
+  if (!(t32 >= -7200 && t32 <= 7200)) return fround(t32 - t32) === 0 ? 2 : 3;
   const n = state[0];
   const v43 = state[1];
   const v48 = state[2];
@@ -317,7 +318,6 @@ export function position(t, state, out) {
   const v155 = state[19];
   const v166 = state[20];
   if (!(n > 0)) return 1;
-  const t32 = fround(t);
   const v167 = fround(n * t32);
   const v168 = fround(v167 * v167);
   const v169 = fround(v168 * -2.755731998149713e-7);

@@ -21,7 +21,7 @@ export const stateWords = 12;
  *   Omega [-3.141592653589793, 3.141592653589793] rad
  *   omega [-3.141592653589793, 3.141592653589793] rad
  *   M0 [-3.141592653589793, 3.141592653589793] rad
- * @param state Float64Array of stateWords words, written
+ * @param {Float64Array} state stateWords words, written
  * @returns 0 good; 1 an element outside its range; 3 an element that is not a finite number.
  *   After any other status than 0 the state is void, and position returns 1.
  */
@@ -250,7 +250,7 @@ export function setup(elements, state) {
  * Predicts at one epoch, in the same operations for every input.
  *
  * @param t time since the reference epoch of the elements, s, in [-7200, 7200]
- * @param state Float64Array that setup filled
+ * @param {Float64Array} state the words that setup wrote
  * @param out array of numbers, written only with status 0:
  *   out[0] position x, m
  *   out[1] position y, m

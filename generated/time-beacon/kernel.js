@@ -5,7 +5,7 @@
  * Model gps-lnav: IS-GPS-200, Table 20-IV and 20.3.3.3.3; formula sha256 ec2b4702d331511f6298b091907f84a6a71366c481a63dcd1c612ba90bb1a12d.
  * Domain flown. Choices: arithmetic f64, Kepler starter secondOrder, corrector newton, cap 2.
  * Error position_m: 2.06e-7 observed, not yet certified.
- * Error clock_s: 4.35e-19 observed, not yet certified.
+ * Error clock_s: 4.34e-19 observed, not yet certified.
  *
  * Not certified for safety of life. The interface documents, local rules and licensed practice decide.
  */
@@ -19,25 +19,25 @@ export const stateWords = 27;
  *   sqrtA [5150, 5160] m^(1/2)
  *   e [0, 0.03] 1
  *   i0 [0.9, 1.02] rad
- *   Omega0 [-3.141592653589793, 3.141592653589793] rad
- *   omega [-3.141592653589793, 3.141592653589793] rad
- *   M0 [-3.141592653589793, 3.141592653589793] rad
- *   deltaN [-1.1703344634137303e-8, 1.1703344634137303e-8] rad/s
- *   IDOT [-2.925836158534326e-9, 2.925836158534326e-9] rad/s
+ *   Omega0 [-3.1415926536, 3.1415926536] rad
+ *   omega [-3.1415926536, 3.1415926536] rad
+ *   M0 [-3.1415926536, 3.1415926536] rad
+ *   deltaN [-1.1703344634254336e-8, 1.1702987476520137e-8] rad/s
+ *   IDOT [-2.925836158563584e-9, 2.925479000829385e-9] rad/s
  *   OmegaDot [-1e-8, -6e-9] rad/s
- *   Cuc [-0.00006103515625, 0.00006103515625] rad
- *   Cus [-0.00006103515625, 0.00006103515625] rad
- *   Crc [-1024, 1024] m
- *   Crs [-1024, 1024] m
- *   Cic [-0.00006103515625, 0.00006103515625] rad
- *   Cis [-0.00006103515625, 0.00006103515625] rad
+ *   Cuc [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Cus [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Crc [-1024.00000001024, 1023.9687500102397] m
+ *   Crs [-1024.00000001024, 1023.9687500102397] m
+ *   Cic [-0.00006103515625061035, 0.0000610332936054611] rad
+ *   Cis [-0.00006103515625061035, 0.0000610332936054611] rad
  *   toe [0, 604784] s
- *   af0 [-0.0009765625, 0.0009765625] s
- *   af1 [-3.725290298461914e-9, 3.725290298461914e-9] s/s
- *   af2 [-3.552713678800501e-15, 3.552713678800501e-15] s/s^2
- *   TGD [-5.960464477539063e-8, 5.960464477539063e-8] s
+ *   af0 [-0.0009765625000097656, 0.0009765620343484783] s
+ *   af1 [-3.725290298499167e-9, 3.725176611661444e-9] s/s
+ *   af2 [-3.552713678836028e-15, 3.5249581032201215e-15] s/s^2
+ *   TGD [-5.960464477598667e-8, 5.9138983488674274e-8] s
  *   toeMinusToc [-7200, 7200] s
- * @param state Float64Array of stateWords words, written
+ * @param {Float64Array} state stateWords words, written
  * @returns 0 good; 1 an element outside its range; 3 an element that is not a finite number.
  *   After any other status than 0 the state is void, and position returns 1.
  */
@@ -50,39 +50,39 @@ export function setup(elements, state) {
   const i0 = elements.i0;
   if (!(i0 >= 0.9 && i0 <= 1.02)) return i0 - i0 === 0 ? 1 : 3;
   const Omega0 = elements.Omega0;
-  if (!(Omega0 >= -3.141592653589793 && Omega0 <= 3.141592653589793)) return Omega0 - Omega0 === 0 ? 1 : 3;
+  if (!(Omega0 >= -3.1415926536 && Omega0 <= 3.1415926536)) return Omega0 - Omega0 === 0 ? 1 : 3;
   const omega = elements.omega;
-  if (!(omega >= -3.141592653589793 && omega <= 3.141592653589793)) return omega - omega === 0 ? 1 : 3;
+  if (!(omega >= -3.1415926536 && omega <= 3.1415926536)) return omega - omega === 0 ? 1 : 3;
   const M0 = elements.M0;
-  if (!(M0 >= -3.141592653589793 && M0 <= 3.141592653589793)) return M0 - M0 === 0 ? 1 : 3;
+  if (!(M0 >= -3.1415926536 && M0 <= 3.1415926536)) return M0 - M0 === 0 ? 1 : 3;
   const deltaN = elements.deltaN;
-  if (!(deltaN >= -1.1703344634137303e-8 && deltaN <= 1.1703344634137303e-8)) return deltaN - deltaN === 0 ? 1 : 3;
+  if (!(deltaN >= -1.1703344634254336e-8 && deltaN <= 1.1702987476520137e-8)) return deltaN - deltaN === 0 ? 1 : 3;
   const IDOT = elements.IDOT;
-  if (!(IDOT >= -2.925836158534326e-9 && IDOT <= 2.925836158534326e-9)) return IDOT - IDOT === 0 ? 1 : 3;
+  if (!(IDOT >= -2.925836158563584e-9 && IDOT <= 2.925479000829385e-9)) return IDOT - IDOT === 0 ? 1 : 3;
   const OmegaDot = elements.OmegaDot;
   if (!(OmegaDot >= -1e-8 && OmegaDot <= -6e-9)) return OmegaDot - OmegaDot === 0 ? 1 : 3;
   const Cuc = elements.Cuc;
-  if (!(Cuc >= -0.00006103515625 && Cuc <= 0.00006103515625)) return Cuc - Cuc === 0 ? 1 : 3;
+  if (!(Cuc >= -0.00006103515625061035 && Cuc <= 0.0000610332936054611)) return Cuc - Cuc === 0 ? 1 : 3;
   const Cus = elements.Cus;
-  if (!(Cus >= -0.00006103515625 && Cus <= 0.00006103515625)) return Cus - Cus === 0 ? 1 : 3;
+  if (!(Cus >= -0.00006103515625061035 && Cus <= 0.0000610332936054611)) return Cus - Cus === 0 ? 1 : 3;
   const Crc = elements.Crc;
-  if (!(Crc >= -1024 && Crc <= 1024)) return Crc - Crc === 0 ? 1 : 3;
+  if (!(Crc >= -1024.00000001024 && Crc <= 1023.9687500102397)) return Crc - Crc === 0 ? 1 : 3;
   const Crs = elements.Crs;
-  if (!(Crs >= -1024 && Crs <= 1024)) return Crs - Crs === 0 ? 1 : 3;
+  if (!(Crs >= -1024.00000001024 && Crs <= 1023.9687500102397)) return Crs - Crs === 0 ? 1 : 3;
   const Cic = elements.Cic;
-  if (!(Cic >= -0.00006103515625 && Cic <= 0.00006103515625)) return Cic - Cic === 0 ? 1 : 3;
+  if (!(Cic >= -0.00006103515625061035 && Cic <= 0.0000610332936054611)) return Cic - Cic === 0 ? 1 : 3;
   const Cis = elements.Cis;
-  if (!(Cis >= -0.00006103515625 && Cis <= 0.00006103515625)) return Cis - Cis === 0 ? 1 : 3;
+  if (!(Cis >= -0.00006103515625061035 && Cis <= 0.0000610332936054611)) return Cis - Cis === 0 ? 1 : 3;
   const toe = elements.toe;
   if (!(toe >= 0 && toe <= 604784)) return toe - toe === 0 ? 1 : 3;
   const af0 = elements.af0;
-  if (!(af0 >= -0.0009765625 && af0 <= 0.0009765625)) return af0 - af0 === 0 ? 1 : 3;
+  if (!(af0 >= -0.0009765625000097656 && af0 <= 0.0009765620343484783)) return af0 - af0 === 0 ? 1 : 3;
   const af1 = elements.af1;
-  if (!(af1 >= -3.725290298461914e-9 && af1 <= 3.725290298461914e-9)) return af1 - af1 === 0 ? 1 : 3;
+  if (!(af1 >= -3.725290298499167e-9 && af1 <= 3.725176611661444e-9)) return af1 - af1 === 0 ? 1 : 3;
   const af2 = elements.af2;
-  if (!(af2 >= -3.552713678800501e-15 && af2 <= 3.552713678800501e-15)) return af2 - af2 === 0 ? 1 : 3;
+  if (!(af2 >= -3.552713678836028e-15 && af2 <= 3.5249581032201215e-15)) return af2 - af2 === 0 ? 1 : 3;
   const TGD = elements.TGD;
-  if (!(TGD >= -5.960464477539063e-8 && TGD <= 5.960464477539063e-8)) return TGD - TGD === 0 ? 1 : 3;
+  if (!(TGD >= -5.960464477598667e-8 && TGD <= 5.9138983488674274e-8)) return TGD - TGD === 0 ? 1 : 3;
   const toeMinusToc = elements.toeMinusToc;
   if (!(toeMinusToc >= -7200 && toeMinusToc <= 7200)) return toeMinusToc - toeMinusToc === 0 ? 1 : 3;
   const A = sqrtA * sqrtA;
@@ -350,7 +350,7 @@ export function setup(elements, state) {
  * Predicts at one epoch, in the same operations for every input.
  *
  * @param t time since the reference epoch of the elements, s, in [-7200, 7200]
- * @param state Float64Array that setup filled
+ * @param {Float64Array} state the words that setup wrote
  * @param out array of numbers, written only with status 0:
  *   out[0] position x, m
  *   out[1] position y, m

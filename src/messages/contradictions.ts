@@ -36,9 +36,9 @@ const ELEMENTS: readonly ElementSymbol[] = [
 ];
 
 /**
- * Finds records of one satellite with the same toe, IODE and IODC whose elements differ: an issue of data names one
- * set of values (IS-GPS-200, 20.3.4.4). Values are compared as multiples of the field's step, so that the digits a
- * writer cut off make no difference.
+ * Finds records of one satellite with the same toe, IODE and IODC whose elements differ: an issue of data
+ * names one set of values (IS-GPS-200, 20.3.4.4). Values are compared as multiples of the field's step, so
+ * that the digits a writer cut off make no difference.
  */
 export function findContradictions(records: Iterable<NavigationRecord>): Contradiction[] {
   const issues = new Map<string, NavigationRecord[]>();

@@ -16,7 +16,9 @@ export type BroadcastUnit =
 /** A run of bits in a subframe of 300 bits. */
 export interface BitRun {
   readonly subframe: number;
-  /** First bit, counted from 1 at the start of the subframe, parity included, as the figures of IS-GPS-200 do. */
+  /**
+   * First bit, counted from 1 at the start of the subframe, parity included, as the figures of IS-GPS-200 do.
+   */
   readonly firstBit: number;
   readonly bits: number;
 }
@@ -28,8 +30,8 @@ export interface RinexSlot {
   /** 0 to 3; column 0 of line 0 is the satellite and the epoch. */
   readonly column: number;
   /**
-   * What stands there: the value in the model's unit; for the accuracy the metres that the index stands for; for
-   * the fit interval flag the hours that it stands for; for toc the calendar date.
+   * What stands there: the value in the model's unit; for the accuracy the metres that the index stands for;
+   * for the fit interval flag the hours that it stands for; for toc the calendar date.
    */
   readonly holds: 'value' | 'metres' | 'hours' | 'date';
   /** Whether a reader may find the slot blank. */
@@ -49,7 +51,10 @@ export interface MessageField {
   readonly place: readonly BitRun[];
   /** The same value sent a second time, for telling data sets apart. */
   readonly copy?: readonly BitRun[];
-  /** The range that the standard calls valid where that is less than what the bits carry, in the broadcast unit. */
+  /**
+   * The range that the standard calls valid where that is less than what the bits carry, in the broadcast
+   * unit.
+   */
   readonly valid?: readonly [number, number];
   /** Absent where RINEX leaves the field out. */
   readonly rinex?: RinexSlot;

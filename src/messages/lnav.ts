@@ -40,9 +40,9 @@ const TIMES: readonly [number, number] = [0, 604784];
  * The GPS LNAV field table.
  *
  * Sources: bits, scales, units and valid ranges, IS-GPS-200, Tables 20-I (clock) and 20-III (ephemeris) and
- * 20.3.3.3.1; places, Figure 20-1, sheets 1 to 3; RINEX slots, RINEX 2.11 Table A4, RINEX 3.05 Table A6 and the
- * same eight lines in RINEX 4.00. All written from memory; test/messages/lnav.test.ts decodes words off the air
- * with it and compares the values with the RINEX record of the same transmission.
+ * 20.3.3.3.1; places, Figure 20-1, sheets 1 to 3; RINEX slots, RINEX 2.11 Table A4, RINEX 3.05 Table A6 and
+ * the same eight lines in RINEX 4.00. All written from memory; test/messages/lnav.test.ts decodes words off
+ * the air with it and compares the values with the RINEX record of the same transmission.
  */
 export const LNAV: Readonly<Record<LnavSymbol, MessageField>> = {
   // Subframe 1: clock and health

@@ -12,8 +12,9 @@ export function halfFitInterval(record: NavigationRecord): number {
 /**
  * The healthy record of one satellite to use at a time: the one whose toe is nearest and within reach.
  *
- * Of two that are equally near, the later toe wins, for a satellite sends an ephemeris during the two hours before its
- * toe rather than after (common practice, no source); of two with one toe, the one sent later; then the later in the file.
+ * Of two that are equally near, the later toe wins, for a satellite sends an ephemeris during the two hours
+ * before its toe rather than after (common practice, no source); of two with one toe, the one sent later;
+ * then the later in the file.
  *
  * @param records records of one satellite
  * @param time time of use

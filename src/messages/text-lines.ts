@@ -12,8 +12,9 @@ const NOT_TEXT = /[^\t\n\r\x20-\xff]/;
 /**
  * Lines of a text file, in batches, without their line ends (LF or CR LF).
  *
- * Memory is bounded by one chunk and one line, whatever the size of the file: a longer line or a character that
- * no text has ends the reading. Bytes are taken as characters one by one, so that columns are columns of bytes.
+ * Memory is bounded by one chunk and one line, whatever the size of the file: a longer line or a character
+ * that no text has ends the reading. Bytes are taken as characters one by one, so that columns are columns of
+ * bytes.
  *
  * @param path file to read
  * @throws InputError with code file.unreadable, file.empty, file.binary or file.long-line

@@ -35,9 +35,10 @@ export interface Comparison {
 const REACH = 3600;
 
 /**
- * Compares one epoch of a precise orbit with GPS LNAV records: broadcast minus precise, with the healthy record whose
- * toe is nearest and within an hour (`nearestRecord`). The broadcast position is that of the antenna, the precise one
- * that of the centre of mass: about -1 m of radial error belongs to that (common practice, no source).
+ * Compares one epoch of a precise orbit with GPS LNAV records: broadcast minus precise, with the healthy
+ * record whose toe is nearest and within an hour (`nearestRecord`). The broadcast position is that of the
+ * antenna, the precise one that of the centre of mass: about -1 m of radial error belongs to that (common
+ * practice, no source).
  *
  * @param records records by satellite
  * @param epoch precise states

@@ -12,18 +12,22 @@ export interface OrbitError {
   readonly total: number;
 }
 
-/** Half the span of the difference quotient, s: truncation and rounding stay below 1e-6 m/s on a GPS orbit. */
+/**
+ * Half the span of the difference quotient, s: truncation and rounding stay below 1e-6 m/s on a GPS orbit.
+ */
 const HALF_SPAN = 0.1;
 
-/** Velocity in the frame of the positions, by a central difference of a position function of time in seconds. */
+/**
+ * Velocity in the frame of the positions, by a central difference of a position function of time in seconds.
+ */
 export function differenceVelocity(positionAt: (t: number) => Position, t: number): Position {
   return scaled(minus(positionAt(t + HALF_SPAN), positionAt(t - HALF_SPAN)), 1 / (2 * HALF_SPAN));
 }
 
 /**
- * Takes a position error apart along the axes of the orbit.
- * Axes: radial along r, cross along r x v, along completes them; v is the inertial velocity, that is the velocity in
- * the Earth-fixed frame plus the rotation of the Earth x r (common practice, no source).
+ * Takes a position error apart along the axes of the orbit. Axes: radial along r, cross along r x v, along
+ * completes them; v is the inertial velocity, that is the velocity in the Earth-fixed frame plus the rotation
+ * of the Earth x r (common practice, no source).
  *
  * @param position position under test, Earth-fixed, m
  * @param reference position taken as true, Earth-fixed, m

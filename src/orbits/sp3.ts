@@ -35,8 +35,8 @@ const METRES_PER_KM = 1e3;
 const METRES_PER_DM = 0.1;
 
 /**
- * Epochs of an SP3 file of version a, c or d in GPS time, in the order of the file. The file is read in chunks, so
- * memory does not grow with its size.
+ * Epochs of an SP3 file of version a, c or d in GPS time, in the order of the file. The file is read in
+ * chunks, so memory does not grow with its size.
  * Source: Hilla, The Extended Standard Product 3 Orbit Format (SP3-c), 2010, and SP3-d, 2016.
  *
  * @param path file to read

@@ -11,7 +11,9 @@ export interface Suspect {
 
 /** The outcome of the test for outliers. */
 export interface SuspectSearch {
-  /** Error from which on a point makes its record suspect, m; undefined where the records are too few to tell. */
+  /**
+   * Error from which on a point makes its record suspect, m; undefined where the records are too few to tell.
+   */
   readonly limit: number | undefined;
   readonly suspects: readonly Suspect[];
   /** Statistics over the points of all other records; undefined where none are left. */
@@ -21,7 +23,9 @@ export interface SuspectSearch {
 /** With fewer records the median may itself be that of a bad one. */
 const FEWEST_RECORDS = 5;
 
-/** Robust standard deviations above the median. Sound GPS broadcast orbits of whole days reach 8 (measured). */
+/**
+ * Robust standard deviations above the median. Sound GPS broadcast orbits of whole days reach 8 (measured).
+ */
 const DEVIATIONS = 15;
 
 /** Median absolute deviation to standard deviation, for a normal distribution. */
@@ -31,8 +35,9 @@ const NORMAL = 1.4826;
 const RESOLUTION = 1e-3;
 
 /**
- * Tests each record of a group against the spread of the whole group: a record is suspect if any of its points has
- * an error above the median by fifteen robust standard deviations (median absolute deviation times 1.4826).
+ * Tests each record of a group against the spread of the whole group: a record is suspect if any of its
+ * points has an error above the median by fifteen robust standard deviations (median absolute deviation times
+ * 1.4826).
  */
 export function findSuspects(points: readonly ComparedPoint[]): SuspectSearch {
   const byRecord = groupBy(points, (point) => point.record);

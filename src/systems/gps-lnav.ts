@@ -1,37 +1,58 @@
-import type { Domain, ModelDescription } from '../models/description.ts';
-import { GPS, GPS_PI } from './gps.ts';
+import { fieldRange, modelUnit } from '../messages/field.ts';
+import { LNAV, type LnavSymbol } from '../messages/lnav.ts';
+import type { Domain, ModelDescription, Range } from '../models/description.ts';
+import { GPS } from './gps.ts';
 
-const SEMICIRCLE = GPS_PI;
-const field = (min: number, max: number): { min: number; max: number; from: string } => ({
-  min,
-  max,
-  from: 'all that the field can carry, IS-GPS-200 Tables 20-I and 20-III',
-});
-const full = { min: -Math.PI, max: Math.PI, from: 'the full circle, rounded to float64' };
+/** Elements of the model in the order in which setup reads them; their units stand in the field table. */
+const ELEMENTS: readonly LnavSymbol[] = [
+  'sqrtA',
+  'e',
+  'i0',
+  'Omega0',
+  'omega',
+  'M0',
+  'deltaN',
+  'IDOT',
+  'OmegaDot',
+  'Cuc',
+  'Cus',
+  'Crc',
+  'Crs',
+  'Cic',
+  'Cis',
+  'toe',
+  'af0',
+  'af1',
+  'af2',
+  'TGD',
+];
 
+/** The last digit of a RINEX number can lift a value over the end of its field: room of one unit in the eleventh digit. */
+const PRINTED = 1 + 1e-11;
+
+/** The full circle. */
+const circle: Range = { min: -3.1415926536, max: 3.1415926536, from: 'the full circle, with room for a value printed to eleven digits' };
+
+/** All that a field can carry. */
+function carried(symbol: LnavSymbol): Range {
+  const { min, max } = fieldRange(LNAV[symbol]);
+  const from = 'all that the field can carry, IS-GPS-200 Tables 20-I and 20-III, with room for a value printed to eleven digits';
+  return { min: min * PRINTED, max: max * PRINTED, from };
+}
+
+/** The constellation as it flies: what the fields carry, cut to the orbits that GPS satellites have. */
 const flown: Domain = {
+  ...Object.fromEntries(ELEMENTS.map((symbol) => [symbol, carried(symbol)])),
   sqrtA: { min: 5150, max: 5160, from: 'the constellation as it flies: A = 26,560 km and its spread' },
-  e: { min: 0, max: 0.03, from: 'the constellation as it flies; IS-GPS-200 20.3.3.4.3 allows up to 0.03' },
+  e: { min: 0, max: 0.03, from: 'the constellation as it flies, and the range of the field, IS-GPS-200 Table 20-III' },
   i0: { min: 0.9, max: 1.02, from: 'the constellation as it flies: 55 degrees and its spread' },
-  Omega0: full,
-  omega: full,
-  M0: full,
-  deltaN: field(-(2 ** -28) * SEMICIRCLE, 2 ** -28 * SEMICIRCLE),
-  IDOT: field(-(2 ** -30) * SEMICIRCLE, 2 ** -30 * SEMICIRCLE),
   OmegaDot: { min: -1e-8, max: -6e-9, from: 'the constellation as it flies' },
-  Cuc: field(-(2 ** -14), 2 ** -14),
-  Cus: field(-(2 ** -14), 2 ** -14),
-  Crc: field(-1024, 1024),
-  Crs: field(-1024, 1024),
-  Cic: field(-(2 ** -14), 2 ** -14),
-  Cis: field(-(2 ** -14), 2 ** -14),
-  toe: field(0, 604784),
-  af0: field(-(2 ** -10), 2 ** -10),
-  af1: field(-(2 ** -28), 2 ** -28),
-  af2: field(-(2 ** -48), 2 ** -48),
-  TGD: field(-(2 ** -24), 2 ** -24),
-  toeMinusToc: { min: -7200, max: 7200, from: 'the clock is referred to the ephemeris epoch or one upload beside it' },
-  t: { min: -7200, max: 7200, from: 'the curve fit interval of four hours and its middle, IS-GPS-200 20.3.4.4' },
+  Omega0: circle,
+  omega: circle,
+  M0: circle,
+  toe: { min: 0, max: 604784, from: 'the valid range of the field, IS-GPS-200 Table 20-III' },
+  toeMinusToc: { min: -7200, max: 7200, from: 'the clock is referred to the epoch of the ephemeris or to one upload beside it' },
+  t: { min: -7200, max: 7200, from: 'the curve fit interval of four hours around toe, IS-GPS-200 20.3.4.4' },
 };
 
 /** The GPS legacy navigation message: broadcast ephemeris and clock. */
@@ -44,10 +65,7 @@ export const gpsLnav: ModelDescription = {
     position: { function: 'position', unit: 'm' },
     clock: { function: 'clock', unit: 's' },
   },
-  units: {
-    sqrtA: 'm^(1/2)', e: '1', i0: 'rad', Omega0: 'rad', omega: 'rad', M0: 'rad', deltaN: 'rad/s', IDOT: 'rad/s', OmegaDot: 'rad/s',
-    Cuc: 'rad', Cus: 'rad', Crc: 'm', Crs: 'm', Cic: 'rad', Cis: 'rad', toe: 's', af0: 's', af1: 's/s', af2: 's/s^2', TGD: 's', toeMinusToc: 's',
-  },
+  units: { ...Object.fromEntries(ELEMENTS.map((symbol) => [symbol, modelUnit(LNAV[symbol])])), toeMinusToc: 's' },
   constants: { ...GPS },
   frameRate: GPS.OmegaEDot,
   domains: { flown },

@@ -58,7 +58,10 @@ export function toCalendar(time: GnssTime): CalendarTime {
   };
 }
 
-/** The instant as ISO 8601 text without a zone, such as 2022-01-01T06:00:00, with a fraction only where needed. */
+/**
+ * The instant as ISO 8601 text without a zone, such as 2022-01-01T06:00:00, with a fraction only where
+ * needed.
+ */
 export function toIso(time: GnssTime): string {
   const { year, month, day, hour, minute, second } = toCalendar(time);
   const [whole, fraction] = second.toFixed(9).split('.') as [string, string];
@@ -72,8 +75,8 @@ const ISO = /^(\d{4})-(\d{2})-(\d{2})(?:[T ](\d{2}):(\d{2})(?::(\d{2}(?:\.\d+)?)
 /**
  * Reads what `toIso` writes; the seconds or the whole time of day may be left out.
  *
- * @returns the instant, or undefined where the text has another form or names no date. A zone is another form:
- *   UTC differs from system time by leap seconds, which this does not know.
+ * @returns the instant, or undefined where the text has another form or names no date. A zone is another
+ *   form: UTC differs from system time by leap seconds, which this does not know.
  */
 export function fromIso(text: string): GnssTime | undefined {
   const match = ISO.exec(text);
@@ -89,7 +92,10 @@ export function fromIso(text: string): GnssTime | undefined {
   });
 }
 
-/** Milliseconds since 1970 of a midnight; setUTCFullYear does not take years below 100 for 19xx as Date.UTC does. */
+/**
+ * Milliseconds since 1970 of a midnight; setUTCFullYear does not take years below 100 for 19xx as Date.UTC
+ * does.
+ */
 function midnight(year: number, month: number, day: number): number {
   return new Date(0).setUTCFullYear(year, month - 1, day);
 }

@@ -22,8 +22,8 @@ export interface GnssTime {
 export function gnssTime(week: number, seconds: number): GnssTime {
   const carry = Math.floor(seconds / WEEK);
   const rest = seconds - carry * WEEK;
-  if (rest >= WEEK) return { week: week + carry + 1, seconds: 0 }; // so little before a week that it rounds to it
-  return { week: week + carry, seconds: Math.max(0, rest) }; // the quotient above may round to zero from below
+  if (rest >= WEEK) return { week: week + carry + 1, seconds: 0 }; // rounded up to a whole week
+  return { week: week + carry, seconds: Math.max(0, rest) }; // a tiny negative quotient rounds to zero
 }
 
 /** The instant a number of seconds later. */

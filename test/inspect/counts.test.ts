@@ -135,6 +135,8 @@ describe('counts that are a lower bound', () => {
     'return sine(a);',
     'const [x] = p; return x;',
     'return "n" + a;',
+    'return 2n * 3n;',
+    'using x = p; return x;',
   ])('%s', (statements) => {
     const text = `${frame(statements)} function sine(x: number) { return Math.sin(x); }`;
     expect(functionsOf(text).find(({ name }) => name === 'counted')).toMatchObject({ complete: false });

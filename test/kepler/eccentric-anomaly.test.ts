@@ -6,7 +6,7 @@ import { eccentricAnomaly } from '../../src/kepler/eccentric-anomaly.ts';
 const DEGREE = Math.PI / 180;
 
 describe('eccentricAnomaly', () => {
-  // Meeus, Astronomical Algorithms, chapter 30: tables of E for M = 5 degrees and others, and the hard case of p. 205
+  // Meeus, Astronomical Algorithms, chapter 30: tables of E, and the hard case of p. 205
   it.each([
     { e: 0.1, M: 5, E: 5.554589, digits: 5.1e-7 },
     { e: 0.3, M: 5, E: 7.13496, digits: 5.1e-7 },
@@ -48,7 +48,7 @@ describe('eccentricAnomaly', () => {
       const E = eccentricAnomaly(M, e);
       worst = Math.max(worst, Math.abs(E - M - e * Math.sin(E)));
     }
-    // One unit in the last place of E (2^-51 up to pi) times the slope of at most 2, and 2^-52 for rounding this check.
+    // One unit in the last place of E, 2^-51, times the slope of at most 2, and 2^-52 for rounding here.
     expect(worst).toBeLessThan(5 * 2 ** -52);
   });
 
@@ -67,6 +67,27 @@ describe('eccentricAnomaly', () => {
       }
     }
     expect(worst).toBeLessThan(4 * 2 ** -53);
+  });
+
+  it('takes whole turns off without loss, where e near 1 would magnify it, against 60 digits', () => {
+    const D = Decimal.clone({ precision: 60 });
+    const exact = (value: number) => new D(value.toPrecision(100));
+    for (const turns of [1, 2, 3, -4, 10, 20]) {
+      for (const past of [0, 1e-6, 0.01, 1, -2]) {
+        const M = turns * 2 * Math.PI + past;
+        const E = eccentricAnomaly(M, 0.999);
+        const residual = exact(E)
+          .minus(exact(E).sin().times(exact(0.999)))
+          .minus(exact(M))
+          .abs()
+          .toNumber();
+        const slope = 1 - 0.999 * Math.cos(E);
+        // One unit in the last place of E; to reduce M, 2 pi is held to 2^-105, and rounding the rest costs 2^-52.
+        expect(residual, `${turns} turns and ${past}`).toBeLessThan(
+          slope * Math.abs(E) * 2 ** -52 + 2 ** -51,
+        );
+      }
+    }
   });
 
   it('is odd in M, grows with M and keeps the turn', () => {

@@ -11,8 +11,8 @@ import { position as twoBody } from '../../src/models/two-body.ts';
 import { GPS, SPEED_OF_LIGHT } from '../../src/systems/gps.ts';
 
 /**
- * Remondi, Computing satellite velocity using the broadcast ephemeris, GPS Solutions 8(3), 2004, with the program
- * bc_velo.c: satellite 20 at 86400 s of week 1124.
+ * Remondi, Computing satellite velocity using the broadcast ephemeris, GPS Solutions 8(3), 2004, with the
+ * program bc_velo.c: satellite 20 at 86400 s of week 1124.
  */
 const REMONDI: BroadcastElements & ClockParameters = {
   sqrtA: 5153.79589081,

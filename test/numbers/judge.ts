@@ -2,11 +2,11 @@ import { Decimal } from 'decimal.js';
 import type { Pairs } from '../../codegen/numbers/double-double.ts';
 
 /** The judge of these tests: decimal.js with 60 digits. */
-export const Judge = Decimal.clone({ precision: 60, defaults: true });
+export const Judge: typeof Decimal = Decimal.clone({ precision: 60, defaults: true });
 export type Judged = Decimal;
 
 /** The unit roundoff of float64, 2^-53. */
-export const U = 2 ** -53;
+export const U: number = 2 ** -53;
 
 /** A float64 number as a decimal, to 100 digits: decimal.js itself would take the shortest text that reads back. */
 export function exact(x: number): Judged {

@@ -75,7 +75,7 @@ describe('resolveWeek', () => {
     expect(resolveWeek(0, { week: 1023, seconds: 0 })).toBe(1024);
     expect(resolveWeek(0, { week: 2047, seconds: 0 })).toBe(2048);
     expect(resolveWeek(1023, { week: 2048, seconds: 0 })).toBe(2047);
-    expect(resolveWeek(142, { week: 2100, seconds: 0 })).toBe(2190); // 2022-01-01, SP3 header of CODE: week 2190
+    expect(resolveWeek(142, { week: 2100, seconds: 0 })).toBe(2190); // header of the CODE orbit of 2022-01-01
   });
 
   it('finds any week from its ten bits', () => {

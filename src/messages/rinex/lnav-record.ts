@@ -17,7 +17,9 @@ const EPOCHS = {
   3: /^G([ \d]\d) (\d{4}) ([ \d]\d) ([ \d]\d) ([ \d]\d) ([ \d]\d) ([ \d]\d)$/,
 } as const;
 
-/** Stands for a transmission time that the writer does not know. Source: RINEX 2.11, Table A4 (from memory). */
+/**
+ * Stands for a transmission time that the writer does not know. Source: RINEX 2.11, Table A4 (from memory).
+ */
 const UNKNOWN_TIME = 0.9999e9;
 
 /** The weeks of LNAV repeat after 1024; some writers leave the week truncated. */

@@ -7,8 +7,8 @@ import { RecordCutter } from './record-lines.ts';
 /**
  * GPS LNAV records of a RINEX navigation file of version 2, 3 or 4, in the order of the file.
  *
- * Other systems and other messages are passed over; a file without GPS LNAV gives no records. The file is read in
- * chunks, so memory does not grow with its size.
+ * Other systems and other messages are passed over; a file without GPS LNAV gives no records. The file is
+ * read in chunks, so memory does not grow with its size.
  *
  * @param path file to read
  * @throws InputError at the first fault, with its line; codes start with rinex. or file.

@@ -83,7 +83,7 @@ export class RecordCutter {
   #within(line: string, number: number): RecordLines | undefined {
     const isFirst = this.#lines.length === 0;
     if (isFirst) this.#first = number;
-    const belongs = isFirst ? /^[G \d]/.test(line) : line.startsWith(this.#indent) && line.trim() !== '';
+    const belongs = isFirst ? /^[G \d]/.test(line) : line.startsWith(this.#indent) || line.trim() === '';
     if (!belongs) throw this.#short(number, 'another line comes');
     if (line.includes('\t')) throw this.#tab(line, number);
     this.#lines.push(line);

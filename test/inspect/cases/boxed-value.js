@@ -10,6 +10,10 @@ export function boxes(x) {
   //        ^ inspect.boxed-value
   const c = 12n;
   //        ^ inspect.boxed-value
+  const e = c * 3n;
+  //          ^ inspect.boxed-value
+  //            ^ inspect.boxed-value
   const d = 12;
-  return n === s ? b : c === tag ? d : big;
+  return n === s ? b : c === tag ? d : e - big;
+  //                                     ^ inspect.boxed-value
 }

@@ -11,7 +11,9 @@ export function calls(x, f, o) {
   //             ^ inspect.outside-call
   const e = Number.isFinite(c);
   //               ^ inspect.outside-call
-  return e ? d : own(x);
+  using g = d;
+//^ inspect.outside-call
+  return e ? g : own(x);
 }
 
 const own = (x) => x + 1;
