@@ -1,4 +1,4 @@
-import { readFileSync, readdirSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { dirname, join, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, test } from 'vitest';
@@ -27,7 +27,9 @@ function filesOf(folder: string): readonly string[] {
 /** Relative imports of a file as paths from the root. */
 function importsOf(file: string): readonly string[] {
   const text = readFileSync(join(root, file), 'utf8');
-  return [...text.matchAll(/(?:from|import)\s*\(?\s*'(\.[^']+)'/g)].map((match) => relative(root, resolve(root, dirname(file), match[1]!)));
+  return [...text.matchAll(/(?:from|import)\s*\(?\s*'(\.[^']+)'/g)].map((match) =>
+    relative(root, resolve(root, dirname(file), match[1]!)),
+  );
 }
 
 describe('rooms', () => {
@@ -51,18 +53,27 @@ describe('rooms', () => {
   test('src knows nothing of codegen, bench and test; codegen nothing of bench and test', () => {
     const wrong = [...filesOf('src'), ...filesOf('codegen')].flatMap((file) =>
       importsOf(file)
-        .filter((target) => /^(bench|test)\//.test(target) || (file.startsWith('src') && target.startsWith('codegen')))
+        .filter(
+          (target) =>
+            /^(bench|test)\//.test(target) || (file.startsWith('src') && target.startsWith('codegen')),
+        )
         .map((target) => `${file} -> ${target}`),
     );
     expect(wrong).toEqual([]);
   });
 
   test('inspection is independent of the generator', () => {
-    expect(filesOf('codegen/inspect').flatMap(importsOf).filter((target) => /^codegen\/(?!inspect\/)/.test(target))).toEqual([]);
+    expect(
+      filesOf('codegen/inspect')
+        .flatMap(importsOf)
+        .filter((target) => /^codegen\/(?!inspect\/)/.test(target)),
+    ).toEqual([]);
   });
 
   test('no file is crowded', () => {
-    const long = [...filesOf('src'), ...filesOf('codegen')].filter((file) => readFileSync(join(root, file), 'utf8').split('\n').length > 400);
+    const long = [...filesOf('src'), ...filesOf('codegen')].filter(
+      (file) => readFileSync(join(root, file), 'utf8').split('\n').length > 400,
+    );
     expect(long).toEqual([]);
   });
 });

@@ -29,7 +29,10 @@ export function sinePolynomial(graph: Graph, x: Node, radius: number, format: Fo
   const [, ...rest] = coefficients;
   if (rest.length === 0) return { node: x, error };
   const z = graph.make('mul', x, x);
-  return { node: graph.make('add', x, graph.make('mul', graph.make('mul', x, z), horner(graph, rest, z))), error };
+  return {
+    node: graph.make('add', x, graph.make('mul', graph.make('mul', x, z), horner(graph, rest, z))),
+    error,
+  };
 }
 
 /** cos x = 1 + z (c1 + c2 z + ...), z = x^2, made like the sine. */

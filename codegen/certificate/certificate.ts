@@ -26,7 +26,10 @@ export interface Certificate {
   readonly tool: string;
   readonly model: string;
   readonly choices: Choices;
-  readonly domain: { readonly name: string; readonly ranges: Readonly<Record<string, Range & { readonly unit: string }>> };
+  readonly domain: {
+    readonly name: string;
+    readonly ranges: Readonly<Record<string, Range & { readonly unit: string }>>;
+  };
   readonly error: {
     readonly position_m?: ErrorEntry;
     readonly velocity_mps?: ErrorEntry;

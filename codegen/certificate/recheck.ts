@@ -3,15 +3,15 @@ import { join } from 'node:path';
 import type { Finding } from '../../src/finding.ts';
 import { InputError } from '../../src/finding.ts';
 import { taskOf } from '../choose/task.ts';
-import { type Task, type Variant, describeVariant, makeVariant } from '../choose/variant.ts';
+import { describeVariant, makeVariant, type Task, type Variant } from '../choose/variant.ts';
+import { codeSize } from '../cost/code-size.ts';
 import { digest } from '../files/digest.ts';
 import { printFormula } from '../formula/text.ts';
 import { Judge } from '../observe/judge.ts';
 import { importKernel } from '../observe/module.ts';
 import type { Candidate } from '../observe/observe.ts';
 import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
-import { codeSize } from '../cost/code-size.ts';
-import { FILES, errorSentence } from './files.ts';
+import { errorSentence, FILES } from './files.ts';
 import { outputsDigest } from './outputs-digest.ts';
 
 /**
@@ -26,8 +26,13 @@ export async function recheck(folder: string): Promise<readonly Finding[]> {
   const certificate = parse<Certificate>(folder, FILES.certificate);
   const worst = parse<Record<string, readonly Candidate[]>>(folder, FILES.worst);
   const code = read(folder, FILES.code);
-  const errors = Object.fromEntries(Object.entries(certificate.error).map(([key, entry]) => [key, entry.observed]));
-  const task = taskOf({ model: certificate.model, domain: certificate.domain.name, error: errors }, join(folder, FILES.certificate));
+  const errors = Object.fromEntries(
+    Object.entries(certificate.error).map(([key, entry]) => [key, entry.observed]),
+  );
+  const task = taskOf(
+    { model: certificate.model, domain: certificate.domain.name, error: errors },
+    join(folder, FILES.certificate),
+  );
   const fresh = makeVariant(task, certificate.choices);
   const sentences = Object.entries(certificate.error).map(([key, entry]) => errorSentence(key, entry));
   const expected = describeVariant(task, fresh.kernel, sentences);
@@ -55,10 +60,18 @@ function compareCode(folder: string, code: string, expected: string): readonly F
   ];
 }
 
-async function compareCertificate(folder: string, certificate: Certificate, task: Task, expected: Variant, code: string): Promise<readonly Finding[]> {
+async function compareCertificate(
+  folder: string,
+  certificate: Certificate,
+  task: Task,
+  expected: Variant,
+  code: string,
+): Promise<readonly Finding[]> {
   const judge = new Judge(task.formula, await importKernel(code), task.model.frameRate);
   const names = task.formula.inputs.map((input) => input.name);
-  const ranges = Object.fromEntries(task.formula.inputs.map(({ name, unit }) => [name, { ...task.domain[name]!, unit }]));
+  const ranges = Object.fromEntries(
+    task.formula.inputs.map(({ name, unit }) => [name, { ...task.domain[name]!, unit }]),
+  );
   const facts: readonly (readonly [name: string, stated: unknown, found: unknown])[] = [
     ['domain.ranges', certificate.domain.ranges, ranges],
     ['operations', certificate.operations, expected.cost],
@@ -69,7 +82,14 @@ async function compareCertificate(folder: string, certificate: Certificate, task
     ['digest.outputs', certificate.digest.outputs, outputsDigest(judge, task.domain, names)],
   ];
   return facts.flatMap(([name, stated, found]) =>
-    JSON.stringify(stated) === JSON.stringify(found) ? [] : [differs(folder, `${name} is stated as ${JSON.stringify(stated)} and found to be ${JSON.stringify(found)}`)],
+    JSON.stringify(stated) === JSON.stringify(found)
+      ? []
+      : [
+          differs(
+            folder,
+            `${name} is stated as ${JSON.stringify(stated)} and found to be ${JSON.stringify(found)}`,
+          ),
+        ],
   );
 }
 
@@ -92,9 +112,18 @@ async function replay(
     }
     const found = kept.map(({ point }) => judge.errors(point).get(group)!.size);
     for (const [k, { size }] of kept.entries()) {
-      if (found[k] !== size) findings.push(differs(folder, `worst input ${k} of ${group} is kept with error ${size} and gives ${found[k]}`));
+      if (found[k] !== size)
+        findings.push(
+          differs(folder, `worst input ${k} of ${group} is kept with error ${size} and gives ${found[k]}`),
+        );
     }
-    if (Math.max(...found) !== stated) findings.push(differs(folder, `the observed error of ${group} is stated as ${stated} and its worst input gives ${Math.max(...found)}`));
+    if (Math.max(...found) !== stated)
+      findings.push(
+        differs(
+          folder,
+          `the observed error of ${group} is stated as ${stated} and its worst input gives ${Math.max(...found)}`,
+        ),
+      );
   }
   return findings;
 }

@@ -30,7 +30,10 @@ const entries = {
     v.check((error) => Object.keys(error).length > 0, 'must limit at least one output: position_m, clock_s'),
   ),
   arithmetic: v.optional(
-    v.pipe(v.array(v.picklist(['f64', 'f64-setup-f32-tick', 'f32'])), v.minLength(1, 'must allow at least one arithmetic')),
+    v.pipe(
+      v.array(v.picklist(['f64', 'f64-setup-f32-tick', 'f32'])),
+      v.minLength(1, 'must allow at least one arithmetic'),
+    ),
   ),
   tick_operations: v.optional(amount),
   setup_operations: v.optional(amount),
@@ -40,7 +43,10 @@ const entries = {
 };
 
 /** Output groups that a budget asks for, by the key that limits their error. */
-export const ERROR_KEYS: Readonly<Record<keyof Budget['error'], string>> = { position_m: 'position', clock_s: 'clock' };
+export const ERROR_KEYS: Readonly<Record<keyof Budget['error'], string>> = {
+  position_m: 'position',
+  clock_s: 'clock',
+};
 
 /**
  * Reads a budget file.
@@ -54,22 +60,38 @@ export function readBudget(file: string): Budget {
   } catch {
     throw new InputError(fault(file, 'budget.missing', 'the file cannot be read', 'Correct the path.'));
   }
-  if (text.trim() === '') throw new InputError(fault(file, 'budget.empty', 'the budget is empty', 'Write model, domain and error.'));
+  if (text.trim() === '')
+    throw new InputError(
+      fault(file, 'budget.empty', 'the budget is empty', 'Write model, domain and error.'),
+    );
   let json: unknown;
   try {
     json = JSON.parse(text);
   } catch (error) {
-    throw new InputError(fault(file, 'budget.syntax', `not JSON: ${(error as Error).message}`, 'Mend the syntax.'));
+    throw new InputError(
+      fault(file, 'budget.syntax', `not JSON: ${(error as Error).message}`, 'Mend the syntax.'),
+    );
   }
   const result = v.safeParse(v.strictObject(entries), json);
   if (result.success) return result.output;
   throw new InputError(
     ...result.issues.map((issue) =>
-      fault(file, 'budget.value', `${v.getDotPath(issue) ?? 'the budget'}: ${issue.message}`, `Known keys are ${Object.keys(entries).join(', ')}.`),
+      fault(
+        file,
+        'budget.value',
+        `${v.getDotPath(issue) ?? 'the budget'}: ${issue.message}`,
+        `Known keys are ${Object.keys(entries).join(', ')}.`,
+      ),
     ),
   );
 }
 
 function fault(file: string, code: string, what: string, remedy: string): Finding {
-  return { code, place: { file }, what, why: 'A budget is a JSON record whose keys carry their units.', remedy };
+  return {
+    code,
+    place: { file },
+    what,
+    why: 'A budget is a JSON record whose keys carry their units.',
+    remedy,
+  };
 }

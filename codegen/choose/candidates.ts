@@ -20,6 +20,9 @@ export function candidates(budget: Budget, domain: Domain): readonly Choices[] {
   const allowed = budget.arithmetic ?? (Object.keys(FORMATS) as Arithmetic[]);
   return allowed.flatMap((name) => {
     const [setup, tick] = FORMATS[name];
-    return Array.from({ length: MOST_STEPS }, (_, k): Choices => ({ setup, tick, starter, corrector: 'newton', cap: k + 1 }));
+    return Array.from(
+      { length: MOST_STEPS },
+      (_, k): Choices => ({ setup, tick, starter, corrector: 'newton', cap: k + 1 }),
+    );
   });
 }

@@ -1,9 +1,9 @@
 import { codeSize } from '../cost/code-size.ts';
-import { type Choices, arithmeticName } from '../kernel/choices.ts';
+import { arithmeticName, type Choices } from '../kernel/choices.ts';
 import { type Effort, FULL_EFFORT, type Observed, observe } from '../observe/observe.ts';
 import { type Budget, ERROR_KEYS } from './budget.ts';
 import { candidates } from './candidates.ts';
-import { type Task, type Variant, judgeOf, makeVariant } from './variant.ts';
+import { judgeOf, makeVariant, type Task, type Variant } from './variant.ts';
 
 /** A short look that can only rule variants out: an error seen is an error. */
 const FIRST_LOOK: Effort = { points: 2000, starts: 1, steps: 0, seed: 3 };
@@ -53,7 +53,12 @@ export async function choose(task: Task, budget: Budget, progress: Progress): Pr
 }
 
 /** Observes a variant's own code over the task's domain. */
-export async function look(task: Task, variant: Variant, effort: Effort, progress: (share: number) => void): Promise<readonly Observed[]> {
+export async function look(
+  task: Task,
+  variant: Variant,
+  effort: Effort,
+  progress: (share: number) => void,
+): Promise<readonly Observed[]> {
   const names = task.formula.inputs.map((input) => input.name);
   return observe(await judgeOf(task, variant), task.domain, names, effort, progress);
 }
@@ -64,7 +69,8 @@ export function variantName(choices: Choices): string {
 }
 
 function inOrderOfCost(task: Task, budget: Budget): readonly (readonly [Choices, Variant])[] {
-  const cost = ({ cost: { tick, setup } }: Variant) => [tick.total + tick.round, setup.total + setup.round] as const;
+  const cost = ({ cost: { tick, setup } }: Variant) =>
+    [tick.total + tick.round, setup.total + setup.round] as const;
   return candidates(budget, task.domain)
     .map((choices) => [choices, makeVariant(task, choices)] as const)
     .sort(([, a], [, b]) => cost(a)[0] - cost(b)[0] || cost(a)[1] - cost(b)[1]);
@@ -91,6 +97,10 @@ function errorExcesses(observed: readonly Observed[], budget: Budget): readonly 
   );
 }
 
-function excesses(list: readonly (readonly [limit: string, allowed: number | undefined, found: number])[]): readonly Excess[] {
-  return list.flatMap(([limit, allowed, found]) => (allowed !== undefined && found > allowed ? [{ limit, allowed, found }] : []));
+function excesses(
+  list: readonly (readonly [limit: string, allowed: number | undefined, found: number])[],
+): readonly Excess[] {
+  return list.flatMap(([limit, allowed, found]) =>
+    allowed !== undefined && found > allowed ? [{ limit, allowed, found }] : [],
+  );
 }

@@ -1,5 +1,5 @@
-import type { Domain } from '../../src/models/description.ts';
 import { InputError } from '../../src/finding.ts';
+import type { Domain } from '../../src/models/description.ts';
 import { MODELS } from '../../src/systems/catalogue.ts';
 import { readModel } from '../read/model.ts';
 import { type Budget, ERROR_KEYS } from './budget.ts';
@@ -20,7 +20,9 @@ export function taskOf(budget: Budget, file: string): Task {
     .map(([, group]) => group);
   for (const group of groups) pick(model.outputs, group, 'output', file);
   const formula = readModel(model, groups);
-  const domain: Domain = Object.fromEntries(formula.inputs.map(({ name }) => [name, pick(all, name, 'range', file)]));
+  const domain: Domain = Object.fromEntries(
+    formula.inputs.map(({ name }) => [name, pick(all, name, 'range', file)]),
+  );
   return { model, formula, domainName: budget.domain, domain };
 }
 

@@ -1,10 +1,10 @@
 import { dirname } from 'node:path';
 import type { Certificate } from '../certificate/certificate.ts';
+import { FILES, variantFiles } from '../certificate/files.ts';
 import { readBudget } from '../choose/budget.ts';
-import { type Excess, type Trial, choose, variantName } from '../choose/choose.ts';
+import { choose, type Excess, type Trial, variantName } from '../choose/choose.ts';
 import { taskOf } from '../choose/task.ts';
 import { writeTogether } from '../files/write.ts';
-import { FILES, variantFiles } from '../certificate/files.ts';
 import { parseArguments, usageError } from './arguments.ts';
 import type { Command } from './command.ts';
 import { ProgressLine } from './progress.ts';
@@ -23,7 +23,10 @@ Nothing is written when none fits: the limits that bind are named and the exit c
 export const generate: Command = {
   help,
   async run(args) {
-    const { values, positionals } = parseArguments('generate', args, { output: { type: 'string' }, json: { type: 'boolean' } });
+    const { values, positionals } = parseArguments('generate', args, {
+      output: { type: 'string' },
+      json: { type: 'boolean' },
+    });
     const [file, ...more] = positionals;
     if (file === undefined || more.length > 0) throw usageError('generate', 'one budget file is needed');
     const budget = readBudget(file);
@@ -33,7 +36,9 @@ export const generate: Command = {
     progress.end();
     const last = trials.at(-1)!;
     if (last.excesses.length > 0) {
-      process.stdout.write(values.json ? `${JSON.stringify({ trials: trials.map(summary) }, null, 2)}\n` : formatTrials(trials));
+      process.stdout.write(
+        values.json ? `${JSON.stringify({ trials: trials.map(summary) }, null, 2)}\n` : formatTrials(trials),
+      );
       process.stderr.write(`${file}: budget.no-fit: no variant fits the budget\n    ${nearest(trials)}\n`);
       return 1;
     }
@@ -41,7 +46,10 @@ export const generate: Command = {
     const files = await variantFiles(task, budget, last.variant, last.observed);
     writeTogether(folder, files);
     process.stdout.write(values.json ? files.get(FILES.certificate)! : formatTrials(trials));
-    if (!values.json) process.stdout.write(`\n${describe(JSON.parse(files.get(FILES.certificate)!) as Certificate, folder)}\n`);
+    if (!values.json)
+      process.stdout.write(
+        `\n${describe(JSON.parse(files.get(FILES.certificate)!) as Certificate, folder)}\n`,
+      );
     return 0;
   },
 };
@@ -77,6 +85,8 @@ function nearest(trials: readonly Trial[]): string {
 }
 
 function describe(certificate: Certificate, folder: string): string {
-  const errors = Object.entries(certificate.error).map(([key, entry]) => `${key} ${entry.observed.toExponential(2)} observed, not yet certified`);
+  const errors = Object.entries(certificate.error).map(
+    ([key, entry]) => `${key} ${entry.observed.toExponential(2)} observed, not yet certified`,
+  );
   return `written to ${folder}: ${certificate.code.bytes} bytes of code (${certificate.code.minified_bytes} minified); error ${errors.join(', ')}`;
 }

@@ -1,6 +1,6 @@
 #!/usr/bin/env node
 import { styleText } from 'node:util';
-import { InputError, formatFinding } from '../../src/finding.ts';
+import { formatFinding, InputError } from '../../src/finding.ts';
 import type { Command } from './command.ts';
 
 /** Commands are loaded when they are called, so that help is instant. */

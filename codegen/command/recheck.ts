@@ -23,7 +23,9 @@ export const recheck: Command = {
       process.stdout.write(`${JSON.stringify({ folders: results }, null, 2)}\n`);
     } else {
       for (const { folder, findings } of results) {
-        process.stdout.write(findings.length === 0 ? `${folder}: as certified\n` : `${findings.map(formatFinding).join('\n')}\n`);
+        process.stdout.write(
+          findings.length === 0 ? `${folder}: as certified\n` : `${findings.map(formatFinding).join('\n')}\n`,
+        );
       }
     }
     return results.some(({ findings }) => findings.length > 0) ? 1 : 0;

@@ -1,4 +1,4 @@
-import { type Kernel, isRounded } from '../kernel/kernel.ts';
+import { isRounded, type Kernel } from '../kernel/kernel.ts';
 import { ARITHMETIC, COUNTED, type Counted, type Operations } from '../kernel/operations.ts';
 
 /** Operations of one run of setup and of one tick, on the path that ends with status 0. */

@@ -30,7 +30,9 @@ export function emitCode(kernel: Kernel, claims: Claims): string {
     'export function position(t, state, out) {',
     ...checkTime(kernel),
     ...kernel.state.map((line, slot) => `  const ${kernel.lines[line]!.name} = state[${slot}];`),
-    ...(kernel.guard < 0 ? [] : [`  if (!(${kernel.lines[kernel.state[kernel.guard]!]!.name} > 0)) return 1;`]),
+    ...(kernel.guard < 0
+      ? []
+      : [`  if (!(${kernel.lines[kernel.state[kernel.guard]!]!.name} > 0)) return 1;`]),
     ...assignments(kernel, 'tick'),
     ...kernel.outputs.map((output, index) => `  out[${index}] = ${operand(kernel.lines[output.line]!)};`),
     '  return 0;',
@@ -41,12 +43,18 @@ export function emitCode(kernel: Kernel, claims: Claims): string {
 
 /** Reads one element and checks its range. */
 function readElement(kernel: Kernel, name: string): readonly string[] {
-  const input = kernel.lines.findIndex((line) => line.stage === 'setup' && line.operation === 'input' && line.name === name);
+  const input = kernel.lines.findIndex(
+    (line) => line.stage === 'setup' && line.operation === 'input' && line.name === name,
+  );
   return [`  const ${name} = elements.${name};`, ...checkRange(kernel, input, 1)];
 }
 
 function checkTime(kernel: Kernel): readonly string[] {
-  return checkRange(kernel, kernel.lines.findIndex((line) => line.stage === 'tick' && line.operation === 'input'), 2);
+  return checkRange(
+    kernel,
+    kernel.lines.findIndex((line) => line.stage === 'tick' && line.operation === 'input'),
+    2,
+  );
 }
 
 /**
@@ -59,7 +67,8 @@ function checkRange(kernel: Kernel, input: number, status: 1 | 2): readonly stri
   const rounded = roundedInput(kernel, input);
   const check = (value: string, bound: (x: number) => string, finite: string) =>
     `  if (!(${value} >= ${bound(min)} && ${value} <= ${bound(max)})) return ${finite} === 0 ? ${status} : 3;`;
-  if (rounded === undefined || kernel.choices[stage as 'setup' | 'tick'] === 'f64') return [check(name, literal, `${name} - ${name}`)];
+  if (rounded === undefined || kernel.choices[stage as 'setup' | 'tick'] === 'f64')
+    return [check(name, literal, `${name} - ${name}`)];
   return [
     `  const ${rounded.name} = fround(${name});`,
     check(rounded.name, (x) => literal(Math.fround(x)), `fround(${rounded.name} - ${rounded.name})`),
@@ -72,7 +81,10 @@ function roundedInput(kernel: Kernel, input: number): Line | undefined {
 }
 
 function assignments(kernel: Kernel, stage: 'setup' | 'tick'): readonly string[] {
-  const checked = (line: Line) => line.operation === 'round' && kernel.choices[stage] === 'f32' && kernel.lines[line.args[0]!]!.operation === 'input';
+  const checked = (line: Line) =>
+    line.operation === 'round' &&
+    kernel.choices[stage] === 'f32' &&
+    kernel.lines[line.args[0]!]!.operation === 'input';
   return kernel.lines
     .filter((line) => line.stage === stage && line.operation !== 'input' && !checked(line))
     .map((line) => `  const ${line.name} = ${expression(kernel, line)};`);

@@ -43,7 +43,9 @@ export function documentation(kernel: Kernel, claims: Claims): Documentation {
       'Prepares the state of one satellite; call it once for each upload of elements.',
       '',
       `@param elements record of numbers: ${kernel.elements.join(', ')}; ranges and units:`,
-      ...kernel.elements.map((name) => `  ${name} [${kernel.domain[name]!.min}, ${kernel.domain[name]!.max}] ${claims.units[name] ?? ''}`.trimEnd()),
+      ...kernel.elements.map((name) =>
+        `  ${name} [${kernel.domain[name]!.min}, ${kernel.domain[name]!.max}] ${claims.units[name] ?? ''}`.trimEnd(),
+      ),
       `@param {${array}} state stateWords words, written`,
       '@returns 0 good; 1 an element outside its range; 3 an element that is not a finite number.',
       '  After any other status than 0 the state is void, and position returns 1.',
@@ -54,7 +56,10 @@ export function documentation(kernel: Kernel, claims: Claims): Documentation {
       `@param t time since the reference epoch of the elements, s, in [${kernel.domain['t']!.min}, ${kernel.domain['t']!.max}]`,
       `@param {${array}} state the words that setup wrote`,
       '@param out array of numbers, written only with status 0:',
-      ...kernel.outputs.map((output, index) => `  out[${index}] ${output.group === output.name ? output.name : `${output.group} ${output.name}`}, ${output.unit}`),
+      ...kernel.outputs.map(
+        (output, index) =>
+          `  out[${index}] ${output.group === output.name ? output.name : `${output.group} ${output.name}`}, ${output.unit}`,
+      ),
       '@returns 0 good; 1 a state that setup did not fill; 2 t outside its span; 3 t not a finite number.',
     ]),
   };

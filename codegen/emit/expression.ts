@@ -1,4 +1,4 @@
-import { type Kernel, type Line, isRounded } from '../kernel/kernel.ts';
+import { isRounded, type Kernel, type Line } from '../kernel/kernel.ts';
 
 const INFIX: Readonly<Record<string, string>> = { add: '+', sub: '-', mul: '*', div: '/' };
 

@@ -4,7 +4,10 @@ import { readFileSync } from 'node:fs';
 export function toolVersion(): string {
   for (const path of ['../../package.json', '../../../package.json']) {
     try {
-      const { name, version } = JSON.parse(readFileSync(new URL(path, import.meta.url), 'utf8')) as { name: string; version: string };
+      const { name, version } = JSON.parse(readFileSync(new URL(path, import.meta.url), 'utf8')) as {
+        name: string;
+        version: string;
+      };
       return `${name} ${version}`;
     } catch (error) {
       if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error;

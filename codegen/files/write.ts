@@ -10,7 +10,9 @@ import { join } from 'node:path';
  */
 export function writeTogether(folder: string, files: ReadonlyMap<string, string>): void {
   mkdirSync(folder, { recursive: true });
-  const temporary = new Map([...files.keys()].map((name) => [name, join(folder, `.${name}.${process.pid}.part`)]));
+  const temporary = new Map(
+    [...files.keys()].map((name) => [name, join(folder, `.${name}.${process.pid}.part`)]),
+  );
   try {
     for (const [name, text] of files) writeFileSync(temporary.get(name)!, text);
     for (const [name, part] of temporary) renameSync(part, join(folder, name));

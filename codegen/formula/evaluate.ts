@@ -1,5 +1,5 @@
-import * as functions from '../numbers/double-double-functions.ts';
 import * as pairs from '../numbers/double-double.ts';
+import * as functions from '../numbers/double-double-functions.ts';
 import { inOrder } from './graph.ts';
 import type { Node, Operation } from './node.ts';
 
@@ -37,7 +37,9 @@ export class Evaluator {
       this.slots.set(node, slot);
       if (node.operation === 'constant') pairs.set(this.registers, slot, node.value);
     }
-    this.inputs = order.filter((node) => node.operation === 'input').map((node) => [node.name, this.slots.get(node)!] as const);
+    this.inputs = order
+      .filter((node) => node.operation === 'input')
+      .map((node) => [node.name, this.slots.get(node)!] as const);
     this.steps = order
       .filter((node) => node.args.length > 0)
       .map((node) => {

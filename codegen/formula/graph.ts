@@ -1,4 +1,4 @@
-import { type Node, OPERATIONS, type Operation, type Stage, laterStage } from './node.ts';
+import { laterStage, type Node, OPERATIONS, type Operation, type Stage } from './node.ts';
 
 /** Makes nodes so that equal expressions are one object, and only exact identities with 0 and 1 are simplified. */
 export class Graph {
@@ -14,13 +14,19 @@ export class Graph {
   constant(value: number): Node {
     if (!Number.isFinite(value)) throw new RangeError(`a constant must be finite, not ${value}`);
     const key = Object.is(value, -0) ? '0' : String(value);
-    return this.intern({ operation: 'constant', args: [], stage: 'constant', value: value + 0, name: '' }, `constant ${key}`);
+    return this.intern(
+      { operation: 'constant', args: [], stage: 'constant', value: value + 0, name: '' },
+      `constant ${key}`,
+    );
   }
 
   /** Any other operation. The order of the arguments of sums and products does not matter for sharing. */
   make(operation: Operation, ...args: readonly Node[]): Node {
-    if (args.length !== OPERATIONS[operation]) throw new RangeError(`${operation} takes ${OPERATIONS[operation]} arguments`);
-    return this.simplify(operation, args) ?? this.intern(this.plain(operation, args), this.key(operation, args));
+    if (args.length !== OPERATIONS[operation])
+      throw new RangeError(`${operation} takes ${OPERATIONS[operation]} arguments`);
+    return (
+      this.simplify(operation, args) ?? this.intern(this.plain(operation, args), this.key(operation, args))
+    );
   }
 
   private plain(operation: Operation, args: readonly Node[]): Node {

@@ -1,6 +1,14 @@
 import { InputError } from '../../src/finding.ts';
 import { Graph, inOrder } from './graph.ts';
-import { type Formula, type Input, type Node, OPERATIONS, type Operation, type Output, type Stage } from './node.ts';
+import {
+  type Formula,
+  type Input,
+  type Node,
+  OPERATIONS,
+  type Operation,
+  type Output,
+  type Stage,
+} from './node.ts';
 
 /**
  * A formula as text, one node a line, arguments before their users:
@@ -64,7 +72,8 @@ export function parseFormula(text: string, file = 'formula'): Formula {
       name = words[1] ?? refuse('the formula has no name');
     } else if (words[0] === 'input') {
       const [, inputName = '', stage, unit = ''] = words;
-      if (stage !== 'setup' && stage !== 'tick') refuse(`"${stage}" is not a stage of an input (setup, tick)`);
+      if (stage !== 'setup' && stage !== 'tick')
+        refuse(`"${stage}" is not a stage of an input (setup, tick)`);
       inputs.push({ name: inputName, stage: stage as Stage, unit });
       names.set(inputName, graph.input(inputName, stage as Stage));
     } else if (words[0] === 'output') {

@@ -3,7 +3,19 @@ import type { Node, Stage } from '../formula/node.ts';
 import type { Choices, Format } from './choices.ts';
 
 /** Operations of a kernel line. `round` is the rounding of a float64 value to float32. */
-export type Operation = 'input' | 'constant' | 'add' | 'sub' | 'mul' | 'div' | 'neg' | 'sqrt' | 'abs' | 'floor' | 'select' | 'round';
+export type Operation =
+  | 'input'
+  | 'constant'
+  | 'add'
+  | 'sub'
+  | 'mul'
+  | 'div'
+  | 'neg'
+  | 'sqrt'
+  | 'abs'
+  | 'floor'
+  | 'select'
+  | 'round';
 
 /**
  * One machine operation with one rounding. Arguments are numbers of earlier lines; `select` takes a, b, x, y and
@@ -46,5 +58,11 @@ export interface Kernel {
 
 /** Operations that take a Math.fround around them in float32; the others are exact on float32 numbers. */
 export function isRounded(operation: Operation): boolean {
-  return operation === 'add' || operation === 'sub' || operation === 'mul' || operation === 'div' || operation === 'sqrt';
+  return (
+    operation === 'add' ||
+    operation === 'sub' ||
+    operation === 'mul' ||
+    operation === 'div' ||
+    operation === 'sqrt'
+  );
 }

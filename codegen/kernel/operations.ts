@@ -15,7 +15,18 @@ export type Counted =
   | 'store';
 
 /** Kinds that are arithmetic: they make up the total. A comparison is each of < <= > >= === !==; a select is a conditional expression. */
-export const ARITHMETIC: readonly Counted[] = ['add', 'sub', 'mul', 'div', 'neg', 'sqrt', 'abs', 'floor', 'compare', 'select'];
+export const ARITHMETIC: readonly Counted[] = [
+  'add',
+  'sub',
+  'mul',
+  'div',
+  'neg',
+  'sqrt',
+  'abs',
+  'floor',
+  'compare',
+  'select',
+];
 
 /** All kinds; roundings to float32, loads and stores are listed beside the total. */
 export const COUNTED: readonly Counted[] = [...ARITHMETIC, 'round', 'load', 'store'];

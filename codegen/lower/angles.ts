@@ -166,8 +166,15 @@ export class AngleRules {
     const orbit = trueAnomaly(y, x);
     const length =
       orbit === undefined
-        ? graph.make('sqrt', graph.make('add', graph.make('mul', cosine, cosine), graph.make('mul', sine, sine)))
-        : graph.make('sub', graph.constant(1), graph.make('mul', this.rewrite(orbit.e), this.turn(orbit.E).cos));
+        ? graph.make(
+            'sqrt',
+            graph.make('add', graph.make('mul', cosine, cosine), graph.make('mul', sine, sine)),
+          )
+        : graph.make(
+            'sub',
+            graph.constant(1),
+            graph.make('mul', this.rewrite(orbit.e), this.turn(orbit.E).cos),
+          );
     const inverse = graph.make('div', graph.constant(1), length);
     return { cos: graph.make('mul', cosine, inverse), sin: graph.make('mul', sine, inverse) };
   }
@@ -203,7 +210,12 @@ function trueAnomaly(y: Node, x: Node): { E: Node; e: Node } | undefined {
   const e = x.args[1]!;
   const isRoot = (node: Node) => {
     const [one, square] = node.operation === 'sqrt' ? (node.args[0]?.args ?? []) : [];
-    return node.args[0]?.operation === 'sub' && one?.value === 1 && square?.operation === 'mul' && square.args.every((factor) => factor === e);
+    return (
+      node.args[0]?.operation === 'sub' &&
+      one?.value === 1 &&
+      square?.operation === 'mul' &&
+      square.args.every((factor) => factor === e)
+    );
   };
   const isSine = (node: Node) => node.operation === 'sin' && node.args[0] === E;
   const [a, b] = y.args as [Node, Node];

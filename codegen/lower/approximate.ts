@@ -1,5 +1,5 @@
-import { type Polynomial, cosinePolynomial, sinePolynomial } from '../approximate/sine.ts';
 import { REDUCED_RADIUS, type Reduction, reduce } from '../approximate/reduction.ts';
+import { cosinePolynomial, type Polynomial, sinePolynomial } from '../approximate/sine.ts';
 import type { Graph } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
 import type { Ranges } from '../formula/ranges.ts';
@@ -79,13 +79,18 @@ class Pass {
   private turn(node: Node, x: Node): Node {
     const radius = this.ranges.magnitude(node.args[0]!) * PADDING;
     const format = this.choices[x.stage === 'tick' ? 'tick' : 'setup'];
-    const { node: made, error } = radius <= LARGEST_PLAIN_RADIUS ? this.plain(node, x, radius, format) : this.reduced(node, x, radius, format);
+    const { node: made, error } =
+      radius <= LARGEST_PLAIN_RADIUS
+        ? this.plain(node, x, radius, format)
+        : this.reduced(node, x, radius, format);
     this.replacements.set(node, { node: made, error });
     return made;
   }
 
   private plain(node: Node, x: Node, radius: number, format: Format): Polynomial {
-    return node.operation === 'sin' ? sinePolynomial(this.graph, x, radius, format) : cosinePolynomial(this.graph, x, radius, format);
+    return node.operation === 'sin'
+      ? sinePolynomial(this.graph, x, radius, format)
+      : cosinePolynomial(this.graph, x, radius, format);
   }
 
   private reduced(node: Node, x: Node, radius: number, format: Format): Polynomial {
@@ -94,7 +99,8 @@ class Pass {
     this.ranges.assert(reduction.remainder, { lo: -REDUCED_RADIUS, hi: REDUCED_RADIUS });
     const sin = sinePolynomial(this.graph, reduction.remainder, REDUCED_RADIUS, format);
     const cos = cosinePolynomial(this.graph, reduction.remainder, REDUCED_RADIUS, format);
-    const made = node.operation === 'sin' ? reduction.sin(sin.node, cos.node) : reduction.cos(sin.node, cos.node);
+    const made =
+      node.operation === 'sin' ? reduction.sin(sin.node, cos.node) : reduction.cos(sin.node, cos.node);
     return { node: made, error: Math.max(sin.error, cos.error) + reduction.error };
   }
 

@@ -15,11 +15,17 @@ export function nameLines(formula: Formula, lines: readonly Line[]): readonly Li
     return name;
   };
   const names: string[] = [];
-  for (const line of lines) names.push(line.operation === 'constant' ? '' : nameOf(line, formula.labels, names, take));
+  for (const line of lines)
+    names.push(line.operation === 'constant' ? '' : nameOf(line, formula.labels, names, take));
   return lines.map((line, index) => ({ ...line, name: names[index]! }));
 }
 
-function nameOf(line: Line, labels: ReadonlyMap<Node, string>, names: readonly string[], take: (wish: string | undefined) => string): string {
+function nameOf(
+  line: Line,
+  labels: ReadonlyMap<Node, string>,
+  names: readonly string[],
+  take: (wish: string | undefined) => string,
+): string {
   if (line.operation === 'input') return line.node.name;
   if (line.operation === 'round') {
     const wide = names[line.args[0]!]!;

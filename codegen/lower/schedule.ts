@@ -17,12 +17,23 @@ import { nameLines } from './names.ts';
  */
 export function schedule(formula: Formula, ranges: Ranges, choices: Choices, domain: Domain): Kernel {
   const scheduler = new Scheduler(choices);
-  const outputs = formula.outputs.map(({ group, name, unit, node }) => ({ group, name, unit, line: scheduler.tickLine(node) }));
+  const outputs = formula.outputs.map(({ group, name, unit, node }) => ({
+    group,
+    name,
+    unit,
+    line: scheduler.tickLine(node),
+  }));
   const { lines, order } = byStage(scheduler.lines);
   const at = (line: number) => order[line]!;
-  const moved = nameLines(formula, lines.map((line) => ({ ...line, args: line.args.map(at) })));
+  const moved = nameLines(
+    formula,
+    lines.map((line) => ({ ...line, args: line.args.map(at) })),
+  );
   const placed = outputs.map((output) => ({ ...output, line: at(output.line) }));
-  const state = stateOf(moved, placed.map((output) => output.line));
+  const state = stateOf(
+    moved,
+    placed.map((output) => output.line),
+  );
   return {
     model: formula.name,
     choices,
@@ -44,7 +55,9 @@ function stateOf(lines: readonly Line[], outputs: readonly number[]): readonly n
 /** Lines with constants first, then setup, then tick, and the new number of every line. */
 function byStage(lines: readonly Line[]): { lines: readonly Line[]; order: readonly number[] } {
   const rank: Readonly<Record<Stage, number>> = { constant: 0, setup: 1, tick: 2 };
-  const sorted = lines.map((line, index) => ({ line, index })).sort((a, b) => rank[a.line.stage] - rank[b.line.stage] || a.index - b.index);
+  const sorted = lines
+    .map((line, index) => ({ line, index }))
+    .sort((a, b) => rank[a.line.stage] - rank[b.line.stage] || a.index - b.index);
   const order: number[] = [];
   for (const [place, { index }] of sorted.entries()) order[index] = place;
   return { lines: sorted.map(({ line }) => line), order };
@@ -111,7 +124,14 @@ class Scheduler {
     return made;
   }
 
-  private push(operation: Operation, args: readonly number[], format: Format, stage: Stage, node: Node, value = 0): number {
+  private push(
+    operation: Operation,
+    args: readonly number[],
+    format: Format,
+    stage: Stage,
+    node: Node,
+    value = 0,
+  ): number {
     return this.lines.push({ name: '', operation, args, format, stage, value, node }) - 1;
   }
 }

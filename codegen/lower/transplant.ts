@@ -10,7 +10,11 @@ export function transplant(formula: Formula, graph: Graph): Formula {
   return {
     ...formula,
     outputs: formula.outputs.map((output) => ({ ...output, node: moved.get(output.node)! })),
-    labels: new Map([...formula.labels].filter(([node]) => moved.has(node)).map(([node, label]) => [moved.get(node)!, label])),
+    labels: new Map(
+      [...formula.labels]
+        .filter(([node]) => moved.has(node))
+        .map(([node, label]) => [moved.get(node)!, label]),
+    ),
   };
 }
 

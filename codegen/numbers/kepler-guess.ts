@@ -8,7 +8,8 @@ import { cosine, sine } from './proven-sine.ts';
  * at D = 0 lies above the sine), so Newton's iterates fall from there and the loop ends when rounding stops the
  * fall. Negative s follows by symmetry.
  *
- * @param s sine of M, @param c cosine of M, near the unit circle
+ * @param s sine of M
+ * @param c cosine of M
  * @param e eccentricity, 0 <= e < 1
  * @returns D, rad, good to a few units in the last place, times 1 / (1 - e cos E)
  */

@@ -1,8 +1,8 @@
 import { Evaluator } from '../formula/evaluate.ts';
 import type { Formula, Output } from '../formula/node.ts';
-import type { Point } from './points.ts';
-import { type Vector, dot, orbitAxes } from './axes.ts';
+import { dot, orbitAxes, type Vector } from './axes.ts';
 import type { KernelModule } from './module.ts';
+import type { Point } from './points.ts';
 
 /** Error of one output group at a point: the length of the error vector, in the group's unit, and its parts. */
 export interface GroupError {
@@ -65,7 +65,9 @@ export class Judge {
     const status = this.run(point);
     if (status !== 0) throw new RangeError(`the kernel gives status ${status} at ${JSON.stringify(point)}`);
     this.evaluator.run(point);
-    return new Map(this.groups.map((group, k) => [group, { size: Math.hypot(...this.differences(this.members[k]!)) }]));
+    return new Map(
+      this.groups.map((group, k) => [group, { size: Math.hypot(...this.differences(this.members[k]!)) }]),
+    );
   }
 
   /** Errors at a point with the parts of a position's error, which cost three evaluations. */
@@ -74,10 +76,15 @@ export class Judge {
     const members = this.members[this.groups.indexOf('position')];
     if (members?.length !== 3) return errors;
     const vector = this.differences(members) as unknown as Vector;
-    const [before, here, after] = [-STEP, 0, STEP].map((step) => this.vector(members, { ...point, t: point['t']! + step })) as [Vector, Vector, Vector];
+    const [before, here, after] = [-STEP, 0, STEP].map((step) =>
+      this.vector(members, { ...point, t: point['t']! + step }),
+    ) as [Vector, Vector, Vector];
     const velocity = here.map((_, k) => (after[k]! - before[k]!) / (2 * STEP)) as unknown as Vector;
     const axes = orbitAxes(here, velocity, this.frameRate);
-    errors.set('position', { size: errors.get('position')!.size, parts: [dot(vector, axes.radial), dot(vector, axes.along), dot(vector, axes.cross)] });
+    errors.set('position', {
+      size: errors.get('position')!.size,
+      parts: [dot(vector, axes.radial), dot(vector, axes.along), dot(vector, axes.cross)],
+    });
     return errors;
   }
 

@@ -64,16 +64,30 @@ export function observe(
   };
   for (let k = 0; k < effort.points; k++, tick()) {
     const point = points.draw();
-    for (const [group, { size }] of judge.errors(point)) keep(best.get(group)!, { size, point }, effort.starts);
+    for (const [group, { size }] of judge.errors(point))
+      keep(best.get(group)!, { size, point }, effort.starts);
   }
   return judge.groups.map((group) => {
     const tops = best.get(group)!.map((start) => climb(judge, points, group, start, effort.steps, tick));
     const [top] = tops.sort((a, b) => b.size - a.size) as [Candidate, ...Candidate[]];
-    return { group, size: top.size, at: top.point, parts: largestParts(judge, group, tops), worst: tops.slice(0, KEPT) };
+    return {
+      group,
+      size: top.size,
+      at: top.point,
+      parts: largestParts(judge, group, tops),
+      worst: tops.slice(0, KEPT),
+    };
   });
 }
 
-function climb(judge: Judge, points: Points, group: string, start: Candidate, steps: number, tick: () => void): Candidate {
+function climb(
+  judge: Judge,
+  points: Points,
+  group: string,
+  start: Candidate,
+  steps: number,
+  tick: () => void,
+): Candidate {
   let top = start;
   for (let k = 0; k < steps; k++, tick()) {
     const point = points.near(top.point, 10 ** (-1 - (5 * k) / steps));
@@ -97,7 +111,10 @@ function largestParts(judge: Judge, group: string, list: readonly Candidate[]): 
     const parts = judge.parts(point).get(group)!.parts;
     if (parts === undefined) return null;
     const sizes = parts.map(Math.abs) as [number, number, number];
-    largest = largest === null ? sizes : (largest.map((part, k) => Math.max(part, sizes[k]!)) as [number, number, number]);
+    largest =
+      largest === null
+        ? sizes
+        : (largest.map((part, k) => Math.max(part, sizes[k]!)) as [number, number, number]);
   }
   return largest;
 }

@@ -22,7 +22,8 @@ export class Points {
     for (const name of this.names) {
       const { min, max } = this.domain[name]!;
       const u = this.random.next();
-      point[name] = u < 1 / 12 ? min : u > 11 / 12 ? max : clamp(min + (max - min) * this.random.next(), min, max);
+      point[name] =
+        u < 1 / 12 ? min : u > 11 / 12 ? max : clamp(min + (max - min) * this.random.next(), min, max);
     }
     return point;
   }

@@ -4,7 +4,7 @@ import type { SourceFile } from 'ts-morph';
 import { InputError } from '../../src/finding.ts';
 import type { Graph } from '../formula/graph.ts';
 import type { Node } from '../formula/node.ts';
-import { Reader, exportedFunction } from './reader.ts';
+import { exportedFunction, Reader } from './reader.ts';
 import { finding } from './refusal.ts';
 import { openSource } from './source.ts';
 import { asNumber } from './value.ts';
@@ -25,7 +25,9 @@ export function applyFunction(graph: Graph, file: URL, name: string, args: reado
   opened.set(path, source);
   const declaration = exportedFunction(source, name);
   if (declaration === undefined) {
-    throw new InputError(finding('read.missing-function', { file: basename(path) }, `there is no exported function "${name}"`));
+    throw new InputError(
+      finding('read.missing-function', { file: basename(path) }, `there is no exported function "${name}"`),
+    );
   }
   return asNumber(new Reader(graph, []).call(declaration, args, declaration), declaration);
 }

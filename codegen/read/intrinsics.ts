@@ -19,6 +19,9 @@ const KEPLER_FILE = fileURLToPath(new URL('../../src/kepler/eccentric-anomaly', 
  * form, so the converged solver of src/kepler is a kind of node of its own.
  */
 export function intrinsic(declaration: FunctionDeclaration): Operation | undefined {
-  const path = declaration.getSourceFile().getFilePath().replace(/\.(d\.)?[cm]?[tj]s$/, '');
+  const path = declaration
+    .getSourceFile()
+    .getFilePath()
+    .replace(/\.(d\.)?[cm]?[tj]s$/, '');
   return path === KEPLER_FILE && declaration.getName() === 'eccentricAnomaly' ? 'kepler' : undefined;
 }

@@ -1,4 +1,10 @@
-import { type FunctionDeclaration, type Node as Syntax, type SourceFile, type VariableDeclaration, VariableDeclarationKind } from 'ts-morph';
+import {
+  type FunctionDeclaration,
+  type SourceFile,
+  type Node as Syntax,
+  type VariableDeclaration,
+  VariableDeclarationKind,
+} from 'ts-morph';
 import { describe, refuse } from './refusal.ts';
 
 /** What a name of a module stands for: a function or a module constant. */
@@ -21,9 +27,17 @@ export function lookUp(source: SourceFile, name: string, site: Syntax): Declared
     for (const specifier of statement.getNamedImports()) {
       if ((specifier.getAliasNode()?.getText() ?? specifier.getName()) !== name) continue;
       const target = statement.getModuleSpecifierSourceFile();
-      if (target === undefined) return refuse('read.import', statement, `the module ${statement.getModuleSpecifier().getText()} is not found`);
+      if (target === undefined)
+        return refuse(
+          'read.import',
+          statement,
+          `the module ${statement.getModuleSpecifier().getText()} is not found`,
+        );
       const found = declared(target, specifier.getName(), site);
-      return found ?? refuse('read.import', specifier, `${describe(specifier)} is no function or constant of that module`);
+      return (
+        found ??
+        refuse('read.import', specifier, `${describe(specifier)} is no function or constant of that module`)
+      );
     }
   }
   return undefined;

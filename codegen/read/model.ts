@@ -3,10 +3,10 @@ import { InputError } from '../../src/finding.ts';
 import type { ModelDescription } from '../../src/models/description.ts';
 import { Graph } from '../formula/graph.ts';
 import type { Formula, Node, Output } from '../formula/node.ts';
-import { Reader, exportedFunction } from './reader.ts';
+import { exportedFunction, Reader } from './reader.ts';
 import { finding, refuse } from './refusal.ts';
 import { openSource } from './source.ts';
-import { type RecordValue, isRecord, record } from './value.ts';
+import { isRecord, type RecordValue, record } from './value.ts';
 
 /**
  * Reads a model's TypeScript into a formula. Its functions take (elements, constants, t): fields of the
@@ -31,7 +31,9 @@ export function readModel(model: ModelDescription, groups: readonly string[], te
       return node;
     },
   };
-  const constants = record(new Map(Object.entries(model.constants).map(([name, value]) => [name, graph.constant(value)])));
+  const constants = record(
+    new Map(Object.entries(model.constants).map(([name, value]) => [name, graph.constant(value)])),
+  );
   const t = graph.input('t', 'tick');
   const reader = new Reader(graph, ['t', ...Object.keys(model.units)]);
   const outputs: Output[] = [];
@@ -39,16 +41,23 @@ export function readModel(model: ModelDescription, groups: readonly string[], te
     const output = model.outputs[group];
     const declaration = output && exportedFunction(source, output.function);
     if (output === undefined || declaration === undefined) {
-      const what = output ? `there is no exported function "${output.function}"` : `the model has no output "${group}"`;
+      const what = output
+        ? `there is no exported function "${output.function}"`
+        : `the model has no output "${group}"`;
       throw new InputError(finding('read.missing-function', { file: source.getBaseName() }, what));
     }
     const last = declaration.getParameters()[2];
     if (declaration.getParameters().length !== 3 || last?.getTypeNode()?.getText() !== 'number') {
-      refuse('read.signature', declaration, `${output.function} does not take (elements, constants, t: number)`);
+      refuse(
+        'read.signature',
+        declaration,
+        `${output.function} does not take (elements, constants, t: number)`,
+      );
     }
     const value = reader.call(declaration, [elements, constants, t], declaration);
     if (isRecord(value)) {
-      for (const name of value.names) outputs.push({ group, name, unit: output.unit, node: value.field(name)! });
+      for (const name of value.names)
+        outputs.push({ group, name, unit: output.unit, node: value.field(name)! });
     } else {
       outputs.push({ group, name: group, unit: output.unit, node: value });
     }

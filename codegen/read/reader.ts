@@ -12,10 +12,10 @@ import {
 import type { Graph } from '../formula/graph.ts';
 import type { Node, Operation } from '../formula/node.ts';
 import { readBody } from './body.ts';
-import { MATH_FUNCTIONS, intrinsic } from './intrinsics.ts';
+import { intrinsic, MATH_FUNCTIONS } from './intrinsics.ts';
 import { type Declared, lookUp } from './lookup.ts';
 import { describe, refuse } from './refusal.ts';
-import { type Value, asNumber, isRecord, record } from './value.ts';
+import { asNumber, isRecord, record, type Value } from './value.ts';
 
 const ARITHMETIC: Readonly<Partial<Record<SyntaxKind, Operation>>> = {
   [SyntaxKind.PlusToken]: 'add',
@@ -41,15 +41,25 @@ export class Reader {
 
   /** The value of a call of a declared function with the given arguments. */
   call(declaration: FunctionDeclaration, args: readonly Value[], site: Is): Value {
-    if (this.stack.includes(declaration)) refuse('read.recursion', site, `${declaration.getName()} calls itself`);
+    if (this.stack.includes(declaration))
+      refuse('read.recursion', site, `${declaration.getName()} calls itself`);
     const scope = new Map<string, Value>();
     const parameters = declaration.getParameters();
     if (parameters.length !== args.length) {
-      refuse('read.arguments', site, `${declaration.getName()} takes ${parameters.length} arguments, not ${args.length}`);
+      refuse(
+        'read.arguments',
+        site,
+        `${declaration.getName()} takes ${parameters.length} arguments, not ${args.length}`,
+      );
     }
     for (const [index, parameter] of parameters.entries()) {
       const name = parameter.getNameNode();
-      if (!Is.isIdentifier(name) || parameter.isRestParameter() || parameter.hasInitializer() || parameter.isOptional()) {
+      if (
+        !Is.isIdentifier(name) ||
+        parameter.isRestParameter() ||
+        parameter.hasInitializer() ||
+        parameter.isOptional()
+      ) {
         refuse('read.function-form', parameter, `the parameter ${describe(parameter)} is not a plain name`);
       }
       scope.set(name.getText(), args[index]!);
@@ -62,7 +72,8 @@ export class Reader {
 
   /** Remembers the name that the reference gives to a value; the first name of a value stays. */
   label(value: Value, name: string): void {
-    if (isRecord(value) || value.args.length === 0 || this.labels.has(value) || this.usedLabels.has(name)) return;
+    if (isRecord(value) || value.args.length === 0 || this.labels.has(value) || this.usedLabels.has(name))
+      return;
     this.usedLabels.add(name);
     this.labels.set(value, name);
   }
@@ -82,8 +93,12 @@ export class Reader {
     if (Is.isCallExpression(syntax)) return this.callExpression(syntax, scope);
     if (Is.isObjectLiteralExpression(syntax)) return this.objectLiteral(syntax, scope);
     if (Is.isPrefixUnaryExpression(syntax)) {
-      if (syntax.getOperatorToken() === SyntaxKind.MinusToken) return this.graph.make('neg', this.number(syntax.getOperand(), scope));
-      if (syntax.getOperatorToken() === SyntaxKind.PlusPlusToken || syntax.getOperatorToken() === SyntaxKind.MinusMinusToken) {
+      if (syntax.getOperatorToken() === SyntaxKind.MinusToken)
+        return this.graph.make('neg', this.number(syntax.getOperand(), scope));
+      if (
+        syntax.getOperatorToken() === SyntaxKind.PlusPlusToken ||
+        syntax.getOperatorToken() === SyntaxKind.MinusMinusToken
+      ) {
         refuse('read.assignment', syntax, `${describe(syntax)} changes a value`);
       }
       refuse('read.operator', syntax, `the operator of ${describe(syntax)} is outside the subset`);
@@ -98,7 +113,8 @@ export class Reader {
 
   private literal(syntax: Expression): Node {
     const value = Number(syntax.getText().replaceAll('_', ''));
-    if (!Number.isFinite(value)) refuse('read.literal', syntax, `${describe(syntax)} is not finite as a float64 number`);
+    if (!Number.isFinite(value))
+      refuse('read.literal', syntax, `${describe(syntax)} is not finite as a float64 number`);
     return this.graph.constant(value);
   }
 
@@ -107,19 +123,22 @@ export class Reader {
     if (local !== undefined) return local;
     const declared = lookUp(syntax.getSourceFile(), name, syntax);
     if (declared?.constant !== undefined) return this.constant(declared, syntax);
-    if (declared?.function !== undefined) refuse('read.function-value', syntax, `the function ${name} is used as a value`);
+    if (declared?.function !== undefined)
+      refuse('read.function-value', syntax, `the function ${name} is used as a value`);
     return refuse('read.unknown-name', syntax, `the name "${name}" has no value here`);
   }
 
   /** A constant of a module: a number or a flat record of numbers. */
   private constant(declared: Declared, syntax: Expression): Value {
     const initializer = declared.constant?.getInitializer();
-    if (initializer === undefined) return refuse('read.unknown-name', syntax, `${describe(syntax)} has no initial value`);
+    if (initializer === undefined)
+      return refuse('read.unknown-name', syntax, `${describe(syntax)} has no initial value`);
     return this.expression(initializer, new Map());
   }
 
   private property(syntax: PropertyAccessExpression, scope: Scope): Value {
-    if (syntax.hasQuestionDotToken()) refuse('read.property', syntax, `${describe(syntax)} is optional chaining`);
+    if (syntax.hasQuestionDotToken())
+      refuse('read.property', syntax, `${describe(syntax)} is optional chaining`);
     const name = syntax.getName();
     const left = syntax.getExpression();
     if (Is.isIdentifier(left) && left.getText() === 'Math' && !scope.has('Math')) {
@@ -131,9 +150,15 @@ export class Reader {
 
   /** A field of a record. */
   field(value: Value, name: string, syntax: Is): Node {
-    if (!isRecord(value)) return refuse('read.unknown-field', syntax, `${describe(syntax)} reads a field of a number`);
+    if (!isRecord(value))
+      return refuse('read.unknown-field', syntax, `${describe(syntax)} reads a field of a number`);
     const field = value.field(name);
-    if (field === undefined) return refuse('read.unknown-field', syntax, `there is no number "${name}"; known are ${value.names.join(', ')}`);
+    if (field === undefined)
+      return refuse(
+        'read.unknown-field',
+        syntax,
+        `there is no number "${name}"; known are ${value.names.join(', ')}`,
+      );
     return field;
   }
 
@@ -141,7 +166,11 @@ export class Reader {
     const token = syntax.getOperatorToken();
     const operation = ARITHMETIC[token.getKind()];
     if (operation !== undefined) {
-      return this.graph.make(operation, this.number(syntax.getLeft(), scope), this.number(syntax.getRight(), scope));
+      return this.graph.make(
+        operation,
+        this.number(syntax.getLeft(), scope),
+        this.number(syntax.getRight(), scope),
+      );
     }
     if (token.getText().endsWith('=') && !/^[<>=!]=/.test(token.getText())) {
       refuse('read.assignment', syntax, `${describe(syntax)} assigns`);
@@ -155,9 +184,11 @@ export class Reader {
   /** a < b ? x : y and its three relatives; a <= b ? x : y is b < a ? y : x. */
   private select(condition: Expression, x: Node, y: Node, scope: Scope): Node {
     const test = Is.isParenthesizedExpression(condition) ? condition.getExpression() : condition;
-    if (!Is.isBinaryExpression(test)) return refuse('read.comparison', test, `${describe(test)} is not one comparison`);
+    if (!Is.isBinaryExpression(test))
+      return refuse('read.comparison', test, `${describe(test)} is not one comparison`);
     const operator = test.getOperatorToken().getText();
-    if (!/^[<>]=?$/.test(operator)) return refuse('read.comparison', test, `${describe(test)} is not one of < <= > >=`);
+    if (!/^[<>]=?$/.test(operator))
+      return refuse('read.comparison', test, `${describe(test)} is not one of < <= > >=`);
     const a = this.number(test.getLeft(), scope);
     const b = this.number(test.getRight(), scope);
     switch (operator) {
@@ -174,26 +205,36 @@ export class Reader {
 
   private callExpression(syntax: CallExpression, scope: Scope): Value {
     const args = syntax.getArguments().map((arg) => {
-      if (!Is.isExpression(arg) || Is.isSpreadElement(arg)) return refuse('read.arguments', arg, `${describe(arg)} is not one value`);
+      if (!Is.isExpression(arg) || Is.isSpreadElement(arg))
+        return refuse('read.arguments', arg, `${describe(arg)} is not one value`);
       return this.expression(arg, scope);
     });
     const callee = syntax.getExpression();
     if (Is.isPropertyAccessExpression(callee) && callee.getExpression().getText() === 'Math') {
       return this.operation(MATH_FUNCTIONS[callee.getName()], args, syntax);
     }
-    if (!Is.isIdentifier(callee)) return refuse('read.unknown-call', syntax, `${describe(callee)} cannot be called here`);
+    if (!Is.isIdentifier(callee))
+      return refuse('read.unknown-call', syntax, `${describe(callee)} cannot be called here`);
     const declaration = lookUp(syntax.getSourceFile(), callee.getText(), callee)?.function;
-    if (declaration === undefined) return refuse('read.unknown-call', syntax, `${describe(callee)} is no function of the subset`);
+    if (declaration === undefined)
+      return refuse('read.unknown-call', syntax, `${describe(callee)} is no function of the subset`);
     const operation = intrinsic(declaration);
-    return operation === undefined ? this.call(declaration, args, syntax) : this.operation(operation, args, syntax);
+    return operation === undefined
+      ? this.call(declaration, args, syntax)
+      : this.operation(operation, args, syntax);
   }
 
   private operation(operation: Operation | undefined, args: readonly Value[], syntax: CallExpression): Node {
-    if (operation === undefined) return refuse('read.unknown-call', syntax, `${describe(syntax)} is outside the subset`);
+    if (operation === undefined)
+      return refuse('read.unknown-call', syntax, `${describe(syntax)} is outside the subset`);
     const numbers = args.map((arg, index) => asNumber(arg, syntax.getArguments()[index]!));
     const wanted = operation === 'atan2' || operation === 'kepler' ? 2 : 1;
     if (numbers.length !== wanted) {
-      return refuse('read.arguments', syntax, `${describe(syntax)} has ${numbers.length} arguments in place of ${wanted}`);
+      return refuse(
+        'read.arguments',
+        syntax,
+        `${describe(syntax)} has ${numbers.length} arguments in place of ${wanted}`,
+      );
     }
     return this.graph.make(operation, ...numbers);
   }
@@ -202,7 +243,10 @@ export class Reader {
     const fields = new Map<string, Node>();
     for (const property of syntax.getProperties()) {
       if (Is.isShorthandPropertyAssignment(property)) {
-        fields.set(property.getName(), asNumber(this.name(property.getName(), property.getNameNode(), scope), property));
+        fields.set(
+          property.getName(),
+          asNumber(this.name(property.getName(), property.getNameNode(), scope), property),
+        );
       } else if (Is.isPropertyAssignment(property) && Is.isIdentifier(property.getNameNode())) {
         fields.set(property.getName(), this.number(property.getInitializerOrThrow(), scope));
       } else {
@@ -215,16 +259,29 @@ export class Reader {
 
 /** The refusal that fits an expression of no known kind. */
 function refuseExpression(syntax: Expression): never {
-  if (Is.isElementAccessExpression(syntax)) refuse('read.property', syntax, `${describe(syntax)} reads by a computed name`);
+  if (Is.isElementAccessExpression(syntax))
+    refuse('read.property', syntax, `${describe(syntax)} reads by a computed name`);
   if (Is.isArrayLiteralExpression(syntax)) refuse('read.array', syntax, `${describe(syntax)} is an array`);
   if (Is.isArrowFunction(syntax) || Is.isFunctionExpression(syntax) || Is.isClassExpression(syntax)) {
     refuse('read.function-value', syntax, `${describe(syntax)} is a function or class as a value`);
   }
-  if (Is.isAsExpression(syntax) || Is.isSatisfiesExpression(syntax) || Is.isNonNullExpression(syntax) || Is.isTypeAssertion(syntax)) {
+  if (
+    Is.isAsExpression(syntax) ||
+    Is.isSatisfiesExpression(syntax) ||
+    Is.isNonNullExpression(syntax) ||
+    Is.isTypeAssertion(syntax)
+  ) {
     refuse('read.type-conversion', syntax, `${describe(syntax)} asserts a type`);
   }
-  if (Is.isPostfixUnaryExpression(syntax)) refuse('read.assignment', syntax, `${describe(syntax)} changes a value`);
-  if (Is.isLiteralExpression(syntax) || Is.isTrueLiteral(syntax) || Is.isFalseLiteral(syntax) || Is.isNullLiteral(syntax) || Is.isTemplateExpression(syntax)) {
+  if (Is.isPostfixUnaryExpression(syntax))
+    refuse('read.assignment', syntax, `${describe(syntax)} changes a value`);
+  if (
+    Is.isLiteralExpression(syntax) ||
+    Is.isTrueLiteral(syntax) ||
+    Is.isFalseLiteral(syntax) ||
+    Is.isNullLiteral(syntax) ||
+    Is.isTemplateExpression(syntax)
+  ) {
     refuse('read.literal', syntax, `${describe(syntax)} is not a number`);
   }
   return refuse('read.operator', syntax, `${describe(syntax)} is outside the subset`);

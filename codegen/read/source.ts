@@ -26,7 +26,8 @@ export function openSource(path: string, text?: string): SourceFile {
       types: [],
     },
   });
-  const source = text === undefined ? project.addSourceFileAtPath(path) : project.createSourceFile(path, text);
+  const source =
+    text === undefined ? project.addSourceFileAtPath(path) : project.createSourceFile(path, text);
   const [fault] = project.getProgram().getSyntacticDiagnostics(source);
   if (fault !== undefined) {
     const { line, column } = source.getLineAndColumnAtPos(fault.getStart());

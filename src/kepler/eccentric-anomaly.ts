@@ -1,8 +1,9 @@
 import { sineDefect } from './sine-defect.ts';
 
-/** 2 pi as an unevaluated sum of two float64 numbers. */
-const TWO_PI_HIGH = 6.283185307179586;
-const TWO_PI_LOW = 2.4492935982947064e-16;
+/** 2 pi as a sum of three numbers; the first two have 33 bits at most, so that up to 2^20 turns of them are exact. */
+const TWO_PI: readonly [number, number, number] = [
+  6.2831853069365025, 2.430840201437384e-10, 1.1650928224373424e-19,
+];
 
 /**
  * Eccentric anomaly from Kepler's equation M = E - e sin E, iterated to convergence.
@@ -12,7 +13,7 @@ const TWO_PI_LOW = 2.4492935982947064e-16;
  * (1 - e) sin E + (E - sin E) - M, whose first two terms never cancel: the result is good to a few units in
  * the last place also near e = 1 and M = 0.
  *
- * @param M mean anomaly, rad, any finite value
+ * @param M mean anomaly, rad, any finite value; the digits of its turns are kept up to 2^20 turns
  * @param e eccentricity, 0 <= e < 1
  * @returns eccentric anomaly, rad, in the same turn as M
  * @throws RangeError if M is not finite or e is outside [0, 1)
@@ -20,9 +21,9 @@ const TWO_PI_LOW = 2.4492935982947064e-16;
 export function eccentricAnomaly(M: number, e: number): number {
   if (!Number.isFinite(M)) throw new RangeError(`mean anomaly must be finite, not ${M}`);
   if (!(e >= 0 && e < 1)) throw new RangeError(`eccentricity must lie in [0, 1), not ${e}`);
-  const turns = Math.round(M / TWO_PI_HIGH);
+  const turns = Math.round(M / (2 * Math.PI));
   if (turns === 0) return M < 0 ? -solveHalfTurn(-M, e) : solveHalfTurn(M, e);
-  const m = M - turns * TWO_PI_HIGH - turns * TWO_PI_LOW;
+  const m = M - turns * TWO_PI[0] - turns * TWO_PI[1] - turns * TWO_PI[2];
   const E = m < 0 ? -solveHalfTurn(-m, e) : solveHalfTurn(m, e);
   return M + e * Math.sin(E);
 }

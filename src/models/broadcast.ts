@@ -95,7 +95,11 @@ export function position(elements: BroadcastElements, earth: EarthConstants, t: 
  * @param t time since the reference epoch of the ephemeris, s
  * @returns offset, s; system time = satellite time - offset
  */
-export function clock(elements: BroadcastElements & ClockParameters, earth: EarthConstants, t: number): number {
+export function clock(
+  elements: BroadcastElements & ClockParameters,
+  earth: EarthConstants,
+  t: number,
+): number {
   const { af0, af1, af2, TGD, toeMinusToc } = elements;
   const dt = t + toeMinusToc; // t - toc
   const polynomial = af0 + af1 * dt + af2 * (dt * dt);

@@ -6,7 +6,11 @@ const full: Range = { min: -Math.PI, max: Math.PI, from: 'the full circle, round
 /** Elliptic orbits from low ones to the geosynchronous altitude, up to an eccentricity. */
 function upTo(e: number, from: string): Domain {
   return {
-    a: { min: 6.6e6, max: 4.3e7, from: 'from 220 km of altitude to a little above the geosynchronous radius' },
+    a: {
+      min: 6.6e6,
+      max: 4.3e7,
+      from: 'from 220 km of altitude to a little above the geosynchronous radius',
+    },
     e: { min: 0, max: e, from },
     i: { min: 0, max: Math.PI, from: 'all inclinations, rounded to float64' },
     Omega: full,

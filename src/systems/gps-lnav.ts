@@ -31,12 +31,17 @@ const ELEMENTS: readonly LnavSymbol[] = [
 const PRINTED = 1 + 1e-11;
 
 /** The full circle. */
-const circle: Range = { min: -3.1415926536, max: 3.1415926536, from: 'the full circle, with room for a value printed to eleven digits' };
+const circle: Range = {
+  min: -3.1415926536,
+  max: 3.1415926536,
+  from: 'the full circle, with room for a value printed to eleven digits',
+};
 
 /** All that a field can carry. */
 function carried(symbol: LnavSymbol): Range {
   const { min, max } = fieldRange(LNAV[symbol]);
-  const from = 'all that the field can carry, IS-GPS-200 Tables 20-I and 20-III, with room for a value printed to eleven digits';
+  const from =
+    'all that the field can carry, IS-GPS-200 Tables 20-I and 20-III, with room for a value printed to eleven digits';
   return { min: min * PRINTED, max: max * PRINTED, from };
 }
 
@@ -44,14 +49,22 @@ function carried(symbol: LnavSymbol): Range {
 const flown: Domain = {
   ...Object.fromEntries(ELEMENTS.map((symbol) => [symbol, carried(symbol)])),
   sqrtA: { min: 5150, max: 5160, from: 'the constellation as it flies: A = 26,560 km and its spread' },
-  e: { min: 0, max: 0.03, from: 'the constellation as it flies, and the range of the field, IS-GPS-200 Table 20-III' },
+  e: {
+    min: 0,
+    max: 0.03,
+    from: 'the constellation as it flies, and the range of the field, IS-GPS-200 Table 20-III',
+  },
   i0: { min: 0.9, max: 1.02, from: 'the constellation as it flies: 55 degrees and its spread' },
   OmegaDot: { min: -1e-8, max: -6e-9, from: 'the constellation as it flies' },
   Omega0: circle,
   omega: circle,
   M0: circle,
   toe: { min: 0, max: 604784, from: 'the valid range of the field, IS-GPS-200 Table 20-III' },
-  toeMinusToc: { min: -7200, max: 7200, from: 'the clock is referred to the epoch of the ephemeris or to one upload beside it' },
+  toeMinusToc: {
+    min: -7200,
+    max: 7200,
+    from: 'the clock is referred to the epoch of the ephemeris or to one upload beside it',
+  },
   t: { min: -7200, max: 7200, from: 'the curve fit interval of four hours around toe, IS-GPS-200 20.3.4.4' },
 };
 
@@ -65,7 +78,10 @@ export const gpsLnav: ModelDescription = {
     position: { function: 'position', unit: 'm' },
     clock: { function: 'clock', unit: 's' },
   },
-  units: { ...Object.fromEntries(ELEMENTS.map((symbol) => [symbol, modelUnit(LNAV[symbol])])), toeMinusToc: 's' },
+  units: {
+    ...Object.fromEntries(ELEMENTS.map((symbol) => [symbol, modelUnit(LNAV[symbol])])),
+    toeMinusToc: 's',
+  },
   constants: { ...GPS },
   frameRate: GPS.OmegaEDot,
   domains: { flown },

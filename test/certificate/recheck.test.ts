@@ -30,14 +30,19 @@ describe('recheck names what was changed', () => {
   test('a coefficient changed by one unit in its last place, with its line', async () => {
     edit('kernel.js', (text) => text.replace('0.041666666666666664', '0.04166666666666667'));
     const findings = await recheck(folder);
-    const line = readFileSync(join(source, 'kernel.js'), 'utf8').split('\n').findIndex((text) => text.includes('0.041666666666666664')) + 1;
+    const line =
+      readFileSync(join(source, 'kernel.js'), 'utf8')
+        .split('\n')
+        .findIndex((text) => text.includes('0.041666666666666664')) + 1;
     expect(findings[0]).toMatchObject({ code: 'recheck.code', place: { line } });
     expect(findings.map((finding) => finding.what).join()).toContain('digest.kernel');
   });
 
   test('a smaller observed error', async () => {
     edit('certificate.json', (text) => text.replace(/"observed": [^,]+/, '"observed": 1e-9'));
-    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain('the observed error of position');
+    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain(
+      'the observed error of position',
+    );
   });
 
   test.each([
@@ -53,7 +58,9 @@ describe('recheck names what was changed', () => {
 
   test('a worst input that was made harmless', async () => {
     edit('worst.json', (text) => text.replace(/"t": -?[\d.e-]+/, '"t": 0'));
-    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain('worst input 0 of position');
+    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain(
+      'worst input 0 of position',
+    );
   });
 
   test.each(['kernel.js', 'certificate.json', 'worst.json'])('a missing %s is wrong input', async (name) => {

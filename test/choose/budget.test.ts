@@ -42,7 +42,11 @@ describe('a budget that cannot be used is refused with its fault', () => {
     ['an unknown arithmetic', { ...GOOD, arithmetic: ['f16'] }, /arithmetic\.0/],
     ['an unknown model', { ...GOOD, model: 'moon' }, /budget\.unknown-model: there is no model "moon"/],
     ['an unknown domain', { ...GOOD, domain: 'all' }, /budget\.unknown-domain/],
-    ['an output that the model lacks', { model: 'earth-orbit', domain: 'near-circular', error: { clock_s: 1 } }, /budget\.unknown-output/],
+    [
+      'an output that the model lacks',
+      { model: 'earth-orbit', domain: 'near-circular', error: { clock_s: 1 } },
+      /budget\.unknown-output/,
+    ],
   ])('%s', (_, content, message) => {
     expect(() => take(content)).toThrow(message);
   });
@@ -53,7 +57,8 @@ describe('a budget that cannot be used is refused with its fault', () => {
 });
 
 describe('the generate command', () => {
-  const run = (...args: readonly string[]) => spawnSync(process.execPath, ['--import', 'tsx', main, 'generate', ...args], { encoding: 'utf8' });
+  const run = (...args: readonly string[]) =>
+    spawnSync(process.execPath, ['--import', 'tsx', main, 'generate', ...args], { encoding: 'utf8' });
 
   test('an impossible budget leaves with 1, names the limits that bind and writes nothing', () => {
     const file = write(JSON.stringify({ ...GOOD, error: { position_m: 1e-12 }, tick_operations: 300 }));
@@ -61,7 +66,9 @@ describe('the generate command', () => {
     expect(status).toBe(1);
     expect(stdout).toMatch(/position_m 1\.\d+e-7 > 1e-12/);
     expect(stdout).toMatch(/tick_operations \d+ > 300/);
-    expect(stderr).toMatch(/budget\.no-fit.*\n {4}Nearest is f64, cap \d; it would fit with position_m at 1\.\d+e-7/);
+    expect(stderr).toMatch(
+      /budget\.no-fit.*\n {4}Nearest is f64, cap \d; it would fit with position_m at 1\.\d+e-7/,
+    );
     expect(readdirSync(folder)).toEqual(['budget.json']);
   }, 120_000);
 

@@ -28,25 +28,28 @@ describe.each(folders())('$name: status values', (folder) => {
     }
   });
 
-  test.each(elements)('1 for %s outside its range, 3 for no finite number; the state is void after that', async (name) => {
-    const kernel = await kernelOf(folder);
-    const { min, max } = domain[name]!;
-    const beyond = (max - min) * 1e-3;
-    for (const [value, status] of [
-      [max + beyond, 1],
-      [min - beyond, 1],
-      [Number.NaN, 3],
-      [Number.POSITIVE_INFINITY, 3],
-      [Number.NEGATIVE_INFINITY, 3],
-    ] as const) {
-      const state = new Float64Array(kernel.stateWords);
-      expect(kernel.setup(good, state)).toBe(0);
-      expect(kernel.setup({ ...good, [name]: value }, state)).toBe(status);
-      const out = outputs();
-      expect(kernel.position(0, state, out)).toBe(1);
-      expect([...out]).toEqual([...outputs()]);
-    }
-  });
+  test.each(elements)(
+    '1 for %s outside its range, 3 for no finite number; the state is void after that',
+    async (name) => {
+      const kernel = await kernelOf(folder);
+      const { min, max } = domain[name]!;
+      const beyond = (max - min) * 1e-3;
+      for (const [value, status] of [
+        [max + beyond, 1],
+        [min - beyond, 1],
+        [Number.NaN, 3],
+        [Number.POSITIVE_INFINITY, 3],
+        [Number.NEGATIVE_INFINITY, 3],
+      ] as const) {
+        const state = new Float64Array(kernel.stateWords);
+        expect(kernel.setup(good, state)).toBe(0);
+        expect(kernel.setup({ ...good, [name]: value }, state)).toBe(status);
+        const out = outputs();
+        expect(kernel.position(0, state, out)).toBe(1);
+        expect([...out]).toEqual([...outputs()]);
+      }
+    },
+  );
 
   test('2 for a time outside the span, 3 for no finite number; the outputs stay', async () => {
     const kernel = await kernelOf(folder);

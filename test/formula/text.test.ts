@@ -10,16 +10,33 @@ import { MODELS } from '../../src/systems/catalogue.ts';
 
 /** Formulas of random operations on two inputs and random numbers. */
 const formulas = fc
-  .array(fc.tuple(fc.constantFrom('add', 'sub', 'mul', 'neg', 'sin', 'cos', 'abs', 'select'), fc.nat(), fc.nat(), fc.nat(), fc.nat()), { minLength: 1, maxLength: 30 })
-  .chain((steps) => fc.double({ noNaN: true, noDefaultInfinity: true, min: -10, max: 10 }).map((value) => build(steps, value)));
+  .array(
+    fc.tuple(
+      fc.constantFrom('add', 'sub', 'mul', 'neg', 'sin', 'cos', 'abs', 'select'),
+      fc.nat(),
+      fc.nat(),
+      fc.nat(),
+      fc.nat(),
+    ),
+    { minLength: 1, maxLength: 30 },
+  )
+  .chain((steps) =>
+    fc
+      .double({ noNaN: true, noDefaultInfinity: true, min: -10, max: 10 })
+      .map((value) => build(steps, value)),
+  );
 
-function build(steps: readonly (readonly [string, number, number, number, number])[], value: number): Formula {
+function build(
+  steps: readonly (readonly [string, number, number, number, number])[],
+  value: number,
+): Formula {
   const graph = new Graph();
   const nodes: Node[] = [graph.input('a', 'setup'), graph.input('t', 'tick'), graph.constant(value)];
   for (const [operation, ...picks] of steps) {
     const [w, x, y, z] = picks.map((pick) => nodes[pick % nodes.length]!) as [Node, Node, Node, Node];
     if (operation === 'select') nodes.push(graph.make('select', w, x, y, z));
-    else if (operation === 'add' || operation === 'sub' || operation === 'mul') nodes.push(graph.make(operation, w, x));
+    else if (operation === 'add' || operation === 'sub' || operation === 'mul')
+      nodes.push(graph.make(operation, w, x));
     else nodes.push(graph.make(operation as 'neg', w));
   }
   return {

@@ -1,4 +1,4 @@
-import { existsSync, readFileSync, readdirSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import type { Certificate } from '../../codegen/certificate/certificate.ts';
 
@@ -16,6 +16,10 @@ export function folders(): readonly Folder[] {
     .filter((name) => existsSync(`${root}/${name}/certificate.json`))
     .map((name) => {
       const path = `${root}/${name}`;
-      return { name, path, certificate: JSON.parse(readFileSync(`${path}/certificate.json`, 'utf8')) as Certificate };
+      return {
+        name,
+        path,
+        certificate: JSON.parse(readFileSync(`${path}/certificate.json`, 'utf8')) as Certificate,
+      };
     });
 }

@@ -1,8 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { Evaluator } from '../../codegen/formula/evaluate.ts';
 import { Graph, inOrder } from '../../codegen/formula/graph.ts';
-import { Ranges } from '../../codegen/formula/ranges.ts';
 import type { Formula, Node } from '../../codegen/formula/node.ts';
+import { Ranges } from '../../codegen/formula/ranges.ts';
 import type { Choices } from '../../codegen/kernel/choices.ts';
 import { AngleRules } from '../../codegen/lower/angles.ts';
 import { approximate } from '../../codegen/lower/approximate.ts';
@@ -25,8 +25,15 @@ const CASES = [
 
 /** Largest relative difference of the outputs of two formulas over random points. */
 function difference(a: Formula, b: Formula, domain: Domain, count: number): number {
-  const [left, right] = [a, b].map(({ outputs }) => new Evaluator(outputs.map((output) => output.node))) as [Evaluator, Evaluator];
-  const points = new Points(domain, a.inputs.map((input) => input.name), new Random(21));
+  const [left, right] = [a, b].map(({ outputs }) => new Evaluator(outputs.map((output) => output.node))) as [
+    Evaluator,
+    Evaluator,
+  ];
+  const points = new Points(
+    domain,
+    a.inputs.map((input) => input.name),
+    new Random(21),
+  );
   let largest = 0;
   for (let k = 0; k < count; k++) {
     const point = points.draw();
@@ -50,23 +57,41 @@ describe('exact rules change nothing in exact arithmetic', () => {
     expect(difference(angles, hoistProducts(graph, angles), domain, 500)).toBeLessThan(1e-24);
   });
 
-  test.each(CASES)('%s: no atan2 and no anomaly is left, and sines stand of plain sums', (_, formula, domain) => {
-    const nodes = inOrder(lower(formula, domain, F64).exact.outputs.map((output) => output.node));
-    expect(nodes.filter((node) => node.operation === 'atan2' || node.operation === 'kepler')).toEqual([]);
-    for (const node of nodes.filter((node) => node.operation === 'sin')) {
-      expect(holdsTurn(node.args[0]!), 'a sum of numbers and of turns').toBe(false);
-    }
-  });
+  test.each(CASES)(
+    '%s: no atan2 and no anomaly is left, and sines stand of plain sums',
+    (_, formula, domain) => {
+      const nodes = inOrder(lower(formula, domain, F64).exact.outputs.map((output) => output.node));
+      expect(nodes.filter((node) => node.operation === 'atan2' || node.operation === 'kepler')).toEqual([]);
+      for (const node of nodes.filter((node) => node.operation === 'sin')) {
+        expect(holdsTurn(node.args[0]!), 'a sum of numbers and of turns').toBe(false);
+      }
+    },
+  );
 
   test('the root in atan2 goes only when the identity of the true anomaly holds', () => {
     const graph = new Graph();
-    const rules = () => new AngleRules(graph, new Ranges({ M: { min: 0, max: 1, from: '' }, e: { min: 0, max: 0.5, from: '' }, g: { min: 0, max: 0.5, from: '' } }));
+    const rules = () =>
+      new AngleRules(
+        graph,
+        new Ranges({
+          M: { min: 0, max: 1, from: '' },
+          e: { min: 0, max: 0.5, from: '' },
+          g: { min: 0, max: 0.5, from: '' },
+        }),
+      );
     const [M, e, g] = ['M', 'e', 'g'].map((name) => graph.input(name, 'setup')) as [Node, Node, Node];
     const E = graph.make('kepler', M, e);
-    const root = (x: Node) => graph.make('sqrt', graph.make('sub', graph.constant(1), graph.make('mul', x, x)));
+    const root = (x: Node) =>
+      graph.make('sqrt', graph.make('sub', graph.constant(1), graph.make('mul', x, x)));
     const nu = (x: Node, y: Node, anomaly: Node) =>
-      graph.make('atan2', graph.make('mul', root(x), graph.make('sin', anomaly)), graph.make('sub', graph.make('cos', anomaly), y));
-    const roots = (node: Node) => inOrder([rules().rewrite(graph.make('sin', node))]).filter((inner) => inner.operation === 'sqrt').length;
+      graph.make(
+        'atan2',
+        graph.make('mul', root(x), graph.make('sin', anomaly)),
+        graph.make('sub', graph.make('cos', anomaly), y),
+      );
+    const roots = (node: Node) =>
+      inOrder([rules().rewrite(graph.make('sin', node))]).filter((inner) => inner.operation === 'sqrt')
+        .length;
     expect(roots(nu(e, e, E))).toBe(1);
     expect(roots(nu(e, g, E))).toBe(2);
     expect(roots(nu(g, e, E))).toBe(2);
@@ -86,10 +111,17 @@ describe('approximating rules keep to their stated error', () => {
       const ranges = new Ranges(domain);
       const exact = hoistProducts(graph, new AngleRules(graph, ranges).formula(transplant(formula, graph)));
       const { replacements } = approximate(graph, exact, ranges, choices);
-      const pairs = [...replacements].filter(([node]) => !inOrder(node.args).some((inner) => replacements.has(inner) || inner.operation === 'offset'));
+      const pairs = [...replacements].filter(
+        ([node]) =>
+          !inOrder(node.args).some((inner) => replacements.has(inner) || inner.operation === 'offset'),
+      );
       expect(pairs.length).toBeGreaterThan(4);
       const evaluator = new Evaluator(pairs.flatMap(([node, { node: made }]) => [node, made]));
-      const points = new Points(domain, formula.inputs.map((input) => input.name), new Random(22));
+      const points = new Points(
+        domain,
+        formula.inputs.map((input) => input.name),
+        new Random(22),
+      );
       for (let k = 0; k < 1000; k++) {
         evaluator.run(points.draw());
         for (const [node, { node: made, error }] of pairs) {
@@ -102,18 +134,24 @@ describe('approximating rules keep to their stated error', () => {
 });
 
 describe('the stage split', () => {
-  test.each(CASES)('%s: nothing that depends on elements alone is computed in the tick', (_, formula, domain) => {
-    const { kernel } = lower(formula, domain, F64);
-    for (const line of kernel.lines.filter((line) => line.stage === 'tick' && line.args.length > 0)) {
-      const early = line.args.every((arg) => kernel.lines[arg]!.stage !== 'tick');
-      expect(early, line.name).toBe(false);
-    }
-  });
+  test.each(CASES)(
+    '%s: nothing that depends on elements alone is computed in the tick',
+    (_, formula, domain) => {
+      const { kernel } = lower(formula, domain, F64);
+      for (const line of kernel.lines.filter((line) => line.stage === 'tick' && line.args.length > 0)) {
+        const early = line.args.every((arg) => kernel.lines[arg]!.stage !== 'tick');
+        expect(early, line.name).toBe(false);
+      }
+    },
+  );
 
-  test.each(CASES)('%s: the state holds just the values of setup that the tick reads', (_, formula, domain) => {
-    const { kernel } = lower(formula, domain, F64);
-    const read = new Set(kernel.lines.filter((line) => line.stage === 'tick').flatMap((line) => line.args));
-    for (const line of kernel.state) expect(read.has(line)).toBe(true);
-    expect(new Set(kernel.state).size).toBe(kernel.state.length);
-  });
+  test.each(CASES)(
+    '%s: the state holds just the values of setup that the tick reads',
+    (_, formula, domain) => {
+      const { kernel } = lower(formula, domain, F64);
+      const read = new Set(kernel.lines.filter((line) => line.stage === 'tick').flatMap((line) => line.args));
+      for (const line of kernel.state) expect(read.has(line)).toBe(true);
+      expect(new Set(kernel.state).size).toBe(kernel.state.length);
+    },
+  );
 });

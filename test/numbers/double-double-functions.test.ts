@@ -18,7 +18,7 @@ const [A, B, E, SINE, COSINE, D] = [0, 1, 2, 3, 4, 5];
 /** The error bound that the functions claim: 8 u^2. */
 const CLAIM = 8 * U * U;
 /** What it says was seen of sine, cosine and atan2, with a little room. */
-const SEEN = 3 * U * U;
+const SEEN = 2.6 * U * U;
 
 function setTo(register: number, value: Judged): void {
   const hi = value.toNumber();

@@ -14,7 +14,11 @@ describe('the formula of a model is the model', () => {
   test('broadcast: position and clock agree with the TypeScript run in float64', () => {
     const formula = readModel(gpsLnav, ['position', 'clock']);
     const evaluator = new Evaluator(formula.outputs.map((output) => output.node));
-    const points = new Points(gpsLnav.domains['flown']!, formula.inputs.map((input) => input.name), new Random(11));
+    const points = new Points(
+      gpsLnav.domains['flown']!,
+      formula.inputs.map((input) => input.name),
+      new Random(11),
+    );
     for (let k = 0; k < 2000; k++) {
       const point = points.draw();
       evaluator.run(point);
@@ -30,7 +34,11 @@ describe('the formula of a model is the model', () => {
   test('two-body up to e = 0.9', () => {
     const formula = readModel(earthOrbit, ['position']);
     const evaluator = new Evaluator(formula.outputs.map((output) => output.node));
-    const points = new Points(earthOrbit.domains['highly-eccentric']!, formula.inputs.map((input) => input.name), new Random(12));
+    const points = new Points(
+      earthOrbit.domains['highly-eccentric']!,
+      formula.inputs.map((input) => input.name),
+      new Random(12),
+    );
     for (let k = 0; k < 2000; k++) {
       const point = points.draw();
       evaluator.run(point);
@@ -43,13 +51,18 @@ describe('the formula of a model is the model', () => {
 
   test('inputs carry stage and unit; names of the reference stay', () => {
     const formula = readModel(gpsLnav, ['position']);
-    expect(formula.inputs.find((input) => input.name === 'sqrtA')).toEqual({ name: 'sqrtA', unit: 'm^(1/2)', stage: 'setup' });
+    expect(formula.inputs.find((input) => input.name === 'sqrtA')).toEqual({
+      name: 'sqrtA',
+      unit: 'm^(1/2)',
+      stage: 'setup',
+    });
     expect(formula.inputs.at(-1)).toEqual({ name: 't', unit: 's', stage: 'tick' });
     expect(formula.inputs.map((input) => input.name)).not.toContain('af0');
-    for (const label of ['A', 'n0', 'M', 'E', 'nu', 'phi', 'u', 'r', 'Omega']) expect([...formula.labels.values()]).toContain(label);
+    for (const label of ['A', 'n0', 'M', 'E', 'nu', 'phi', 'u', 'r', 'Omega'])
+      expect([...formula.labels.values()]).toContain(label);
   });
 
-  test('Kepler\'s equation is one node', () => {
+  test("Kepler's equation is one node", () => {
     const formula = readModel(gpsLnav, ['position']);
     const E = [...formula.labels].find(([, label]) => label === 'E')![0];
     expect(E.operation).toBe('kepler');

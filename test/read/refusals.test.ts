@@ -21,7 +21,12 @@ function fileOf(body: string, extra = ''): string {
 }
 
 /** What reading a text refuses. */
-function refusal(text: string): { code: string; line: number | undefined; column: number | undefined; what: string } {
+function refusal(text: string): {
+  code: string;
+  line: number | undefined;
+  column: number | undefined;
+  what: string;
+} {
   try {
     readModel(model, ['clock'], text);
   } catch (error) {
@@ -33,7 +38,13 @@ function refusal(text: string): { code: string; line: number | undefined; column
 }
 
 /** Body, code, line and column of the refusal. */
-const REFUSED: readonly (readonly [name: string, body: string, code: string, line: number, column: number])[] = [
+const REFUSED: readonly (readonly [
+  name: string,
+  body: string,
+  code: string,
+  line: number,
+  column: number,
+])[] = [
   ['let', 'let x = a;\n  return x;', 'read.mutable-binding', 3, 3],
   ['var', 'var x = a;\n  return x;', 'read.mutable-binding', 3, 3],
   ['for loop', 'for (;;) {}\n  return a;', 'read.loop', 3, 3],
@@ -94,9 +105,27 @@ describe('reading refuses what lies outside the numeric subset', () => {
 
   test.each([
     ['recursion', 'return f(a);', 'function f(x: number): number { return f(x); }', 'read.recursion', 5],
-    ['mutual recursion', 'return f(a);', 'function f(x: number): number { return g(x); }\nfunction g(x: number): number { return f(x); }', 'read.recursion', 6],
-    ['default parameter', 'return f(a);', 'function f(x: number = 1): number { return x; }', 'read.function-form', 5],
-    ['rest parameter', 'return f(a);', 'function f(...x: number[]): number { return 1; }', 'read.function-form', 5],
+    [
+      'mutual recursion',
+      'return f(a);',
+      'function f(x: number): number { return g(x); }\nfunction g(x: number): number { return f(x); }',
+      'read.recursion',
+      6,
+    ],
+    [
+      'default parameter',
+      'return f(a);',
+      'function f(x: number = 1): number { return x; }',
+      'read.function-form',
+      5,
+    ],
+    [
+      'rest parameter',
+      'return f(a);',
+      'function f(...x: number[]): number { return 1; }',
+      'read.function-form',
+      5,
+    ],
     ['async function', 'return f(a);', 'async function f(x: number) { return x; }', 'read.function-form', 5],
     ['generator', 'return f(a);', 'function* f(x: number) { return x; }', 'read.function-form', 5],
     ['mutable module binding', 'return k;', 'let k = 1;', 'read.mutable-binding', 3],
@@ -105,7 +134,10 @@ describe('reading refuses what lies outside the numeric subset', () => {
   });
 
   test('an import that leads nowhere', () => {
-    expect(refusal(`import { f } from './nowhere.ts';\n${fileOf('return f(a);')}`)).toMatchObject({ code: 'read.import', line: 1 });
+    expect(refusal(`import { f } from './nowhere.ts';\n${fileOf('return f(a);')}`)).toMatchObject({
+      code: 'read.import',
+      line: 1,
+    });
   });
 
   test('a function that the description names and the file lacks', () => {
@@ -123,9 +155,16 @@ describe('reading refuses what lies outside the numeric subset', () => {
 
 describe('reading accepts', () => {
   test.each([
-    ['conditional expressions with all four comparisons', 'return (a < b ? 1 : a <= b ? 2 : a > b ? 3 : a >= b ? 4 : 5) * t;'],
+    [
+      'conditional expressions with all four comparisons',
+      'return (a < b ? 1 : a <= b ? 2 : a > b ? 3 : a >= b ? 4 : 5) * t;',
+    ],
     ['constants of the module', 'return k * t;', 'const k = 1.5e-3;'],
-    ['functions of the file', 'return f(a, b) * earth.k;', 'function f(x: number, y: number): number { const z = x * y; return z; }'],
+    [
+      'functions of the file',
+      'return f(a, b) * earth.k;',
+      'function f(x: number, y: number): number { const z = x * y; return z; }',
+    ],
     ['Math.PI and grouping', 'return (((Math.PI))) * (a + b);'],
     ['renamed fields', 'const { a: x } = elements;\n  return x - b;'],
     ['numbers with separators', 'return 1_000.5 * t;'],
