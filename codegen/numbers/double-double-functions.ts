@@ -3,8 +3,8 @@ import { offsetGuess } from './kepler-guess.ts';
 
 /**
  * Elementary functions of pairs; with u = 2^-53, relative errors of sine, cosine and atan2 stay below 8 u^2
- * (1e-31; seen 2.4 u^2) for angles up to 2^20 rad, taken as the exact sum of their words. Checked by sampling, not
- * proven: this is the yardstick for observed errors, never part of a certified bound.
+ * (1e-31; seen 2.4 u^2) for angles up to 2^20 rad, taken as the exact sum of their words. Checked by
+ * sampling, not proven: this is the yardstick for observed errors, never part of a certified bound.
  */
 
 /** pi/2 as the sum of four float64 numbers: off by 3e-66. */
@@ -67,8 +67,8 @@ export function sinCos(r: Pairs, s: number, c: number, a: number): void {
 }
 
 /**
- * SINE_T = sin x, COSINE_T = cos x - 1 for |x| <= 1/64, by Taylor series up to x^13 and x^12. Terms below 2^-53
- * of the sum are summed in float64.
+ * SINE_T = sin x, COSINE_T = cos x - 1 for |x| <= 1/64, by Taylor series up to x^13 and x^12. Terms below
+ * 2^-53 of the sum are summed in float64.
  */
 function expand(): void {
   mul(t, Z, X, X);
@@ -130,9 +130,9 @@ export function cos(r: Pairs, d: number, a: number): void {
 }
 
 /**
- * r[d] = the angle of the point (r[x], r[y]), in [-pi, pi]; at the origin, which has none, what Math.atan2 returns.
- * From its float64 guess g the rest is atan((y cos g - x sin g) / (x cos g + y sin g)), an angle so small that
- * its tangent will do.
+ * r[d] = the angle of the point (r[x], r[y]), in [-pi, pi]; at the origin, which has none, what Math.atan2
+ * returns. From its float64 guess g the rest is atan((y cos g - x sin g) / (x cos g + y sin g)), an angle so
+ * small that its tangent will do.
  */
 export function atan2(r: Pairs, d: number, y: number, x: number): void {
   const guess = Math.atan2(r.hi[y]!, r.hi[x]!);
@@ -157,11 +157,12 @@ export function atan2(r: Pairs, d: number, y: number, x: number): void {
 }
 
 /**
- * r[d] = D, the solution of D = e (s cos D + c sin D): the eccentric less the mean anomaly, s = sin M, c = cos M.
- * Newton's iteration from a float64 guess; it ends once the step is so small that its square is out of sight,
- * or, for e next to 1, once steps shrink no more.
+ * r[d] = D, the solution of D = e (s cos D + c sin D): the eccentric less the mean anomaly, s = sin M, c =
+ * cos M. Newton's iteration from a float64 guess; it ends once the step is so small that its square is out of
+ * sight, or, for e next to 1, once steps shrink no more.
  *
- * The error is below 8 u^2 e / (1 - e cos E), E = M + D (seen 1.8): 1e-31 e for small e, 1e-29 for e = 0.99 near M = 0.
+ * The error is below 8 u^2 e / (1 - e cos E), E = M + D (seen 1.8): 1e-31 e for small e, 1e-29 for e = 0.99
+ * near M = 0.
  *
  * @throws RangeError unless 0 <= r[e] < 1
  */
@@ -195,7 +196,8 @@ export function keplerOffset(r: Pairs, d: number, s: number, c: number, e: numbe
 }
 
 /**
- * r[d] = the eccentric anomaly E that solves r[m] = E - r[e] sin E, in the turn of r[m]; error as keplerOffset.
+ * r[d] = the eccentric anomaly E that solves r[m] = E - r[e] sin E, in the turn of r[m]; error as
+ * keplerOffset.
  *
  * @throws RangeError unless 0 <= r[e] < 1
  */

@@ -13,7 +13,9 @@
  * split overflows (from 2^996) or the low word underflows; nothing checks that.
  */
 
-/** A register file: register i is hi[i] + lo[i]. Operations address registers by index and allocate nothing. */
+/**
+ * A register file: register i is hi[i] + lo[i]. Operations address registers by index and allocate nothing.
+ */
 export class Pairs {
   readonly hi: Float64Array;
   readonly lo: Float64Array;
@@ -153,7 +155,10 @@ export function floor(r: Pairs, d: number, a: number): void {
   r.lo[d] = low - (hi - high);
 }
 
-/** The sign of r[a] - r[b]: -1, 0 or 1; NaN if either is NaN. Both must be normalised, as every result here is. */
+/**
+ * The sign of r[a] - r[b]: -1, 0 or 1; NaN if either is NaN. Both must be normalised, as every result here
+ * is.
+ */
 export function compare(r: Pairs, a: number, b: number): number {
   const high = r.hi[a]! - r.hi[b]!;
   return Math.sign(high === 0 ? r.lo[a]! - r.lo[b]! : high);

@@ -1,4 +1,6 @@
-/** An exact number mantissa x 2^exponent. Every finite float64 number is one; sums and products stay exact. */
+/**
+ * An exact number mantissa x 2^exponent. Every finite float64 number is one; sums and products stay exact.
+ */
 export interface Dyadic {
   readonly mantissa: bigint;
   readonly exponent: number;

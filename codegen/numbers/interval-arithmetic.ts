@@ -3,14 +3,17 @@
  * operands.
  *
  * Rounding. The engine rounds to nearest; an endpoint is then moved outward by at least one unit in the last
- * place (see `down`). Trusted: + - * / and Math.sqrt are correctly rounded, as ECMA-262 demands.
+ * place (see `down`). Trusted: + - * / are correctly rounded, as ECMA-262 demands, and so is Math.sqrt, as
+ * IEEE 754 demands of a square root.
  *
  * Whole line. An interval is never empty and never holds NaN. What has no bounds (a divisor that holds zero,
  * an endpoint that overflows inward, a root of negative numbers only, an invalid range, infinity times zero)
  * is [-Infinity, Infinity].
  */
 
-/** A register file: register i is [lo[i], hi[i]]. Operations address registers by index and allocate nothing. */
+/**
+ * A register file: register i is [lo[i], hi[i]]. Operations address registers by index and allocate nothing.
+ */
 export class Intervals {
   readonly lo: Float64Array;
   readonly hi: Float64Array;
@@ -26,15 +29,15 @@ const ULP = 2 ** -52;
 const LEAST = 2 ** -1074;
 
 /**
- * A number at or below the float64 before x, and at most three units below: so a lower bound of every real that
- * rounds to x.
+ * A number at or below the float64 before x, and at most three units below: so a lower bound of every real
+ * that rounds to x.
  *
- * Proof for finite x. ulp(x), the distance from |x| to the next larger float64, is max(2^(k-52), 2^-1074) with
- * 2^k <= |x| < 2^(k+1). Rounding is monotone and ulp(x) is a float64 number: for normal x, |x| 2^-52 >= ulp(x)
- * stays so when rounded, for subnormal x the added 2^-1074 is ulp(x). So what is taken away is at least ulp(x),
- * and the rounded difference is at or below x - ulp(x), a float64 number (or an overflow to -Infinity) that is
- * at or below x's predecessor. -Infinity stays. Infinity, where the real overflowed, gives NaN, which `put`
- * turns into the whole line.
+ * Proof for finite x. ulp(x), the distance from |x| to the next larger float64, is max(2^(k-52), 2^-1074)
+ * with 2^k <= |x| < 2^(k+1). Rounding is monotone and ulp(x) is a float64 number: for normal x, |x| 2^-52 >=
+ * ulp(x) stays so when rounded, for subnormal x the added 2^-1074 is ulp(x). So what is taken away is at
+ * least ulp(x), and the rounded difference is at or below x - ulp(x), a float64 number (or an overflow to
+ * -Infinity) that is at or below x's predecessor. -Infinity stays. Infinity, where the real overflowed, gives
+ * NaN, which `put` turns into the whole line.
  */
 export function down(x: number): number {
   return x - (Math.abs(x) * ULP + LEAST);
@@ -146,7 +149,9 @@ export function intersect(r: Intervals, d: number, a: number, b: number): boolea
   return lo <= hi;
 }
 
-/** r[d] = (a < b ? x : y) for every choice: one branch where the comparison is decided, else the hull of both. */
+/**
+ * r[d] = (a < b ? x : y) for every choice: one branch where the comparison is decided, else the hull of both.
+ */
 export function select(r: Intervals, d: number, a: number, b: number, x: number, y: number): void {
   if (r.hi[a]! < r.lo[b]!) hull(r, d, x, x);
   else if (r.lo[a]! >= r.hi[b]!) hull(r, d, y, y);

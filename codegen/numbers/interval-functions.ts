@@ -29,8 +29,8 @@ export function cos(r: Intervals, d: number, a: number): void {
 }
 
 /**
- * r[d] = the range of a wave of period 2 pi on [lo, hi]: between its values there, and 1 if a crest (at `crest`
- * turns and whole turns from it) lies between, and -1 if a trough does, half a turn off.
+ * r[d] = the range of a wave of period 2 pi on [lo, hi]: between its values there, and 1 if a crest (at
+ * `crest` turns and whole turns from it) lies between, and -1 if a trough does, half a turn off.
  */
 function wave(
   r: Intervals,
@@ -54,8 +54,9 @@ function wave(
 }
 
 /**
- * r[d] = the angles, in [-pi, pi], of the points (x, y) of the box r[x], r[y] of real numbers (zero has no sign: the
- * negative x axis is at pi). All of [-pi, pi] if the box holds the origin or both sides of the negative x axis.
+ * r[d] = the angles, in [-pi, pi], of the points (x, y) of the box r[x], r[y] of real numbers (zero has no
+ * sign: the negative x axis is at pi). All of [-pi, pi] if the box holds the origin or both sides of the
+ * negative x axis.
  *
  * Elsewhere the angle is monotone along each edge, so that two corners hold the extrema.
  */
@@ -73,8 +74,7 @@ export function atan2(r: Intervals, d: number, y: number, x: number): void {
 
 /** A lower bound of the angle of the point (x, y), not the origin; for y = 0, x < 0 of pi. */
 function angleDown(y: number, x: number): number {
-  const guess = Math.atan2(y + 0, x); // no -0
-
+  const guess = Math.atan2(y + 0, x); // + 0 turns -0 into 0
   return Math.max(y >= 0 ? 0 : -PI_UP, down(guess - angleError(y, x, guess)));
 }
 
@@ -84,13 +84,13 @@ function angleUp(y: number, x: number): number {
 }
 
 /**
- * A bound of |angle of (x, y) - guess|: the difference has the tangent (y cos g - x sin g) / (x cos g + y sin g), and
- * |atan q| <= |q|. The guess is trusted in nothing: without bounds, if it lies in the wrong half plane (the
- * tangent would miss whole turns) or more than a right angle off.
+ * A bound of |angle of (x, y) - guess|: the difference has the tangent (y cos g - x sin g) / (x cos g + y sin
+ * g), and |atan q| <= |q|. The guess is trusted in nothing: without bounds, if it lies in the wrong half
+ * plane (the tangent would miss whole turns) or more than a right angle off.
  *
- * Each product carries 3.5 u (2.5 u from the proven sine), a sum 1 u of the magnitudes: 2^-50 = 8 u covers them
- * and the sum that adds the cover; the quotient's own roundings fit in 2^-48. 2^-1060 covers underflow of the
- * products; the range of lengths keeps all else from under- and overflow.
+ * Each product carries 3.5 u (2.5 u from the proven sine), a sum 1 u of the magnitudes: 2^-50 = 8 u covers
+ * them and the sum that adds the cover; the quotient's own roundings fit in 2^-48. 2^-1060 covers underflow
+ * of the products; the range of lengths keeps all else from under- and overflow.
  */
 function angleError(y: number, x: number, guess: number): number {
   const length = Math.max(Math.abs(x), Math.abs(y));

@@ -9,8 +9,8 @@ const ATTEMPTS = 8;
 /**
  * r[d] = the eccentric anomalies E that solve E - e sin E = M for M in r[m] and e in r[e].
  *
- * The left side rises with E for |e| < 1, and so E rises with M. A bound for the whole box is an E where the sign
- * of E - e sin E - M is proven, by outward rounding, for all e at once and M at its end. The point to be
+ * The left side rises with E for |e| < 1, and so E rises with M. A bound for the whole box is an E where the
+ * sign of E - e sin E - M is proven, by outward rounding, for all e at once and M at its end. The point to be
  * proven comes from a float64 solution that is trusted in nothing. Where no such point is found (e next to 1,
  * |M| near 100 rad or above, negative e), E lies within max |e| of M.
  *
@@ -27,8 +27,8 @@ export function keplerE(r: Intervals, d: number, m: number, e: number): void {
 const scratch = new Intervals(2);
 
 /**
- * r[d] = the offsets D = E - M = e sin E for M in r[m] and e in r[e]. E rises with M, so that nothing is lost on
- * the way through it but its rounding. The whole line unless r[e] lies inside (-1, 1).
+ * r[d] = the offsets D = E - M = e sin E for M in r[m] and e in r[e]. E rises with M, so that nothing is lost
+ * on the way through it but its rounding. The whole line unless r[e] lies inside (-1, 1).
  */
 export function keplerOffset(r: Intervals, d: number, m: number, e: number): void {
   const eLo = r.lo[e]!;

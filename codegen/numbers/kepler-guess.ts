@@ -1,12 +1,12 @@
 import { cosine, sine } from './proven-sine.ts';
 
 /**
- * A float64 solution of D = e (s cos D + c sin D): Kepler's equation for D = E - M, s = sin M, c = cos M. It is a
- * guess for the proven and the double-double solvers, which trust nothing of it.
+ * A float64 solution of D = e (s cos D + c sin D): Kepler's equation for D = E - M, s = sin M, c = cos M. It
+ * is a guess for the proven and the double-double solvers, which trust nothing of it.
  *
  * For s >= 0 the equation is convex between the root and its upper bounds e and e s / (1 - e c) (the tangent
- * at D = 0 lies above the sine), so Newton's iterates fall from there and the loop ends when rounding stops the
- * fall. Negative s follows by symmetry.
+ * at D = 0 lies above the sine), so Newton's iterates fall from there and the loop ends when rounding stops
+ * the fall. Negative s follows by symmetry.
  *
  * @param s sine of M
  * @param c cosine of M

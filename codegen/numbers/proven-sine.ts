@@ -1,15 +1,17 @@
 /**
  * Sine and cosine in float64 whose error is proven here, from + - * alone: nothing is taken from the engine.
  *
- * Claim: for |x| <= 100, |sine(x) - sin x| <= 2.5 u |sin x| and |cosine(x) - cos x| <= 2.5 u |cos x|, u = 2^-53.
+ * Claim, with u = 2^-53: |sine(x) - sin x| <= 2.5 u |sin x| and |cosine(x) - cos x| <= 2.5 u |cos x| for
+ * |x| <= 100.
  *
  * Reduction. k is the integer nearest to x * 2 / pi; the product is off by less than 2^-46, so that
  * |x - k pi/2| < pi/4 + 2^-45 and |k| <= 64. For k = 0 the reduced angle is x itself. Else |x| > 1/2:
  *   r1 = x - k C1 is exact: x and k C1 (C1 has 46 bits) are multiples of 2^-53, and |r1| < 1.
  *   k C2 is exact: C2 is below 2^-47 and a multiple of 2^-91.
- *   r + t = r1 - k C2 exactly, |t| <= u |r|: fast two-sum, which needs |r1| >= |k C2|, or else the difference is
- *   a multiple of 2^-91 below 2^-39 and so exact itself, with t = 0.
- *   tail = t - k C3, where |k C3| < 2^-86; C3 is off by less than 2^-147, rounding adds u 2^-85 + u^2 |r|.
+ *   r + t = r1 - k C2 exactly, |t| <= u |r|: fast two-sum, which needs |r1| >= |k C2|, or else the difference
+ *   is a multiple of 2^-91 below 2^-39 and so exact itself, with t = 0.
+ *   tail = t - k C3, where |k C3| < 2^-86; C3 is off by less than 2^-147 (times k, 2^-141), rounding adds
+ *   u 2^-85 + u^2 |r|.
  * No float64 number with 1/2 < |x| <= 100 is nearer than 2^-61 to a multiple of pi/2 (a test goes through all
  * 64 multiples), so r + tail is off by less than 2^-20 u |r|, and |tail| <= u |r| + 2^-86.
  *
@@ -19,8 +21,9 @@
  *   left out 0.31. Together 0.94, and 1.05 in units of u |sin r| as |r| <= 1.1108 |sin r|; the last sum
  *   adds 1: 2.05 < 2.5.
  * Cosine of r + tail = w + (((1 - w) - h) + (z^2 q(z) - r tail)), h = z/2, w = 1 - h rounded; in units of u:
- *   z in h 0.25; truncation 0.001 (z^10 / 20!); z^2 q is at most 0.016 and carries 6 roundings' worth: 0.1; sums 0.03; tail
- *   (r - sin r) left out 0.07; the last sum 0.5. Together 0.95 and, as cos r >= 0.7071, 1.35 |cos r| < 2.5.
+ *   z in h 0.25; truncation 0.001 (z^10 / 20!); z^2 q is at most 0.016 and carries 6 roundings' worth: 0.1;
+ *   sums 0.03; tail (r - sin r) left out 0.07; the last sum 0.5. Together 0.96 and, as cos r >= 0.7071,
+ *   1.36 |cos r| < 2.5.
  * Underflow of z touches only terms below u^2 |r|. Seen: 1.31 u over millions of angles.
  */
 
@@ -36,10 +39,16 @@ const C3 = -1.1351118607522202e-28;
 
 /** The Taylor coefficients that the sine multiplies by z^k and r z: sin r = r + r z (S[0] + S[1] z + ...). */
 export const SINE_COEFFICIENTS: readonly number[] = taylor(3, 8);
-/** The Taylor coefficients that the cosine multiplies by z^k and z^2: cos r = 1 - z/2 + z^2 (C[0] + C[1] z + ...). */
+/**
+ * The Taylor coefficients that the cosine multiplies by z^k and z^2: cos r = 1 - z/2 + z^2 (C[0] + C[1] z +
+ * ...).
+ */
 export const COSINE_COEFFICIENTS: readonly number[] = taylor(4, 8);
 
-/** 1/n!, -1/(n+2)!, ...: `count` of them, the first negative if n = 3, each rounded once (18! < 2^53 is exact). */
+/**
+ * 1/n!, -1/(n+2)!, ...: `count` of them, the first negative if n = 3, each rounded once (18! < 2^53 is
+ * exact).
+ */
 function taylor(n: number, count: number): number[] {
   const coefficients: number[] = [];
   let factorial = n === 3 ? -6 : 24;
@@ -68,8 +77,8 @@ const MARGIN = 2 ** -51;
 const LEAST = 2 ** -1074;
 
 /**
- * A lower bound of the exact sine or cosine for which `sine` or `cosine` gave `value`: taking away 4 u |value|
- * leaves at least 2.9 u of it after rounding.
+ * A lower bound of the exact sine or cosine for which `sine` or `cosine` gave `value`: taking away 4 u
+ * |value| leaves at least 2.9 u of it after rounding.
  */
 export function below(value: number): number {
   return value - (Math.abs(value) * MARGIN + LEAST);

@@ -10,16 +10,21 @@ import {
 } from './dyadic.ts';
 
 /**
- * Proven bounds of |p(x) - sin x| and |p(x) - cos x| on 0 <= x <= R, and so by symmetry on |x| <= R, for polynomials p
- * with float64 coefficients. All is exact integer arithmetic; only the final bound is rounded, upward.
+ * Proven bounds of |p(x) - sin x| and |p(x) - cos x| on 0 <= x <= R, and so by symmetry on |x| <= R, for
+ * polynomials p with float64 coefficients. All is exact integer arithmetic; only the final bound is rounded,
+ * upward.
  *
- * p minus a long Taylor polynomial is a polynomial with rational coefficients; the rest of the series is at most its
- * first term left out (Lagrange). On a piece of [0, R], centre m and half width h, the polynomial q(t) = p(m + h t) is
- * at most sum |q_k| for |t| <= 1. Pieces are halved until that is within 2^-10 of the largest |q| seen.
+ * p minus a long Taylor polynomial is a polynomial with rational coefficients; the rest of the series is at
+ * most its first term left out (Lagrange). On a piece of [0, R], centre m and half width h, the polynomial
+ * q(t) = p(m + h t) is at most sum |q_k| for |t| <= 1. Pieces are halved until that is within 2^-10 of the
+ * largest |q| seen.
  */
 
 /** How far, relatively, a bound may lie above the largest magnitude found. */
 const LOOSE = 2 ** -10;
+
+/** Down here, where float64 numbers thin out, bounds are still bounds but no longer tight. */
+const UNRESOLVED = 2 ** -1060;
 
 /** A polynomial sum c[k] x^k / d with integer c[k] and d > 0. */
 interface Polynomial {
@@ -28,14 +33,17 @@ interface Polynomial {
 }
 
 /**
- * A proven upper bound of |x (c[0] + c[1] x^2 + c[2] x^4 + ...) - sin x| for |x| <= radius, at most 0.3 % above the
- * maximum.
+ * A proven upper bound of |x (c[0] + c[1] x^2 + c[2] x^4 + ...) - sin x| for |x| <= radius, at most 0.3 %
+ * above the maximum.
  */
 export function boundSine(coefficients: readonly number[], radius: number): number {
   return boundSineBins(coefficients, radius, 1)[0]!;
 }
 
-/** A proven upper bound of |c[0] + c[1] x^2 + c[2] x^4 + ... - cos x| for |x| <= radius, at most 0.3 % above the maximum. */
+/**
+ * A proven upper bound of |c[0] + c[1] x^2 + c[2] x^4 + ... - cos x| for |x| <= radius, at most 0.3 % above
+ * the maximum.
+ */
 export function boundCosine(coefficients: readonly number[], radius: number): number {
   return boundCosineBins(coefficients, radius, 1)[0]!;
 }
@@ -66,7 +74,7 @@ function boundBins(coefficients: readonly number[], parity: 0 | 1, radius: numbe
         (rn * BigInt(j + 1)) ** BigInt(next),
         (rd * BigInt(n)) ** BigInt(next) * factorial(next),
       );
-      settled = rest <= bound * LOOSE;
+      settled = rest <= bound * LOOSE + UNRESOLVED;
       bounds[j] = toDoubleUp(add(fromDouble(bound), fromDouble(rest)));
     }
   }
@@ -110,7 +118,10 @@ interface Piece {
   readonly seen: number;
 }
 
-/** An upper bound of |q(t)| for |t| <= 1: the piece with the largest bound is halved until that is near enough. */
+/**
+ * An upper bound of |q(t)| for |t| <= 1: the piece with the largest bound is halved until that is near
+ * enough.
+ */
 function largest(q: Polynomial): number {
   const pieces = [piece(q)];
   let seen = 0;
@@ -118,7 +129,7 @@ function largest(q: Polynomial): number {
     const i = pieces.reduce((most, p, k) => (p.bound > pieces[most]!.bound ? k : most), 0);
     const worst = pieces[i]!;
     seen = Math.max(seen, worst.seen);
-    if (!(worst.bound > seen * (1 + LOOSE))) return worst.bound;
+    if (!(worst.bound > seen * (1 + LOOSE) + UNRESOLVED)) return worst.bound;
     pieces[i] = piece(onPiece(worst.q, 1n, 2n, -1n));
     pieces.push(piece(onPiece(worst.q, 1n, 2n, 1n)));
   }

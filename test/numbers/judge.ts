@@ -8,7 +8,10 @@ export type Judged = Decimal;
 /** The unit roundoff of float64, 2^-53. */
 export const U: number = 2 ** -53;
 
-/** A float64 number as a decimal, to 100 digits: decimal.js itself would take the shortest text that reads back. */
+/**
+ * A float64 number as a decimal, to 100 digits: decimal.js itself would take the shortest text that reads
+ * back.
+ */
 export function exact(x: number): Judged {
   return new Judge(x.toPrecision(100));
 }

@@ -103,6 +103,15 @@ test('a wrong coefficient shows in full', () => {
   expect(boundSine(bad, 1) / 1e-9).toBeCloseTo(1, 2);
 });
 
+test('errors below the least float64 numbers are still bounded', () => {
+  for (const radius of [1e-100, 1e-106, 1e-108, 1e-200, 2 ** -1074]) {
+    const truth = new Judge(radius).pow(3).div(6);
+    const bound = boundSine([1], radius);
+    expect(exact(bound).greaterThanOrEqualTo(truth.times(1 - 1e-15))).toBe(true);
+    expect(bound).toBeLessThan(1.01 * truth.toNumber() + 2 ** -1058);
+  }
+});
+
 test('parts without extent are refused', () => {
   expect(() => boundSine([1], 0)).toThrow(RangeError);
   expect(() => boundSine([1], Infinity)).toThrow(RangeError);
