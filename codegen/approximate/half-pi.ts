@@ -1,9 +1,16 @@
+import type { Dyadic } from '../numbers/dyadic.ts';
+
 /** pi / 2 as an integer over 2^-240, from the published digits of pi. */
 const HALF_PI_BITS = 240n;
 const HALF_PI: bigint = (() => {
   const digits = 314159265358979323846264338327950288419716939937510582097494459230781640628620899862n;
   return (digits << HALF_PI_BITS) / (2n * 10n ** 83n);
 })();
+
+/** pi / 2 rounded down to a multiple of 2^-240. */
+export function halfPi(): Dyadic {
+  return { mantissa: HALF_PI, exponent: -Number(HALF_PI_BITS) };
+}
 
 /** pi / 2 as a sum of numbers that have few bits each, and what the sum leaves out. */
 export interface SplitHalfPi {

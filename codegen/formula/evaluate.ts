@@ -29,9 +29,15 @@ export class Evaluator {
   private readonly slots = new Map<Node, number>();
   private readonly inputs: readonly (readonly [name: string, slot: number])[];
 
-  /** @param roots nodes whose values are wanted */
-  constructor(roots: readonly Node[]) {
-    const order = inOrder(roots);
+  private readonly given: readonly Node[];
+
+  /**
+   * @param roots nodes whose values are wanted
+   * @param given nodes whose values `runFrom` takes, whatever they are made of
+   */
+  constructor(roots: readonly Node[], given: readonly Node[] = []) {
+    this.given = given;
+    const order = inOrder(roots, given);
     this.registers = new pairs.Pairs(order.length);
     for (const [slot, node] of order.entries()) {
       this.slots.set(node, slot);
@@ -41,7 +47,7 @@ export class Evaluator {
       .filter((node) => node.operation === 'input')
       .map((node) => [node.name, this.slots.get(node)!] as const);
     this.steps = order
-      .filter((node) => node.args.length > 0)
+      .filter((node) => node.args.length > 0 && !given.includes(node))
       .map((node) => {
         const [a = 0, b = 0, c = 0, e = 0] = node.args.map((arg) => this.slot(arg));
         return { operation: node.operation, d: this.slot(node), a, b, c, e };
@@ -55,6 +61,12 @@ export class Evaluator {
       if (value === undefined) throw new RangeError(`no value for ${name}`);
       pairs.set(this.registers, slot, value);
     }
+    for (const step of this.steps) this.step(step);
+  }
+
+  /** Evaluates all nodes for given values of the given nodes. */
+  runFrom(values: readonly number[]): void {
+    for (const [k, node] of this.given.entries()) pairs.set(this.registers, this.slot(node), values[k]!);
     for (const step of this.steps) this.step(step);
   }
 

@@ -81,14 +81,19 @@ export class Graph {
   }
 }
 
-/** Nodes that the given ones depend on, themselves included, every argument before its user. */
-export function inOrder(roots: readonly Node[]): readonly Node[] {
+/**
+ * Nodes that the given ones depend on, themselves included, every argument before its user.
+ *
+ * @param roots where to begin
+ * @param leaves nodes whose own arguments are left out
+ */
+export function inOrder(roots: readonly Node[], leaves: readonly Node[] = []): readonly Node[] {
   const seen = new Set<Node>();
   const order: Node[] = [];
   const visit = (node: Node): void => {
     if (seen.has(node)) return;
     seen.add(node);
-    for (const arg of node.args) visit(arg);
+    if (!leaves.includes(node)) for (const arg of node.args) visit(arg);
     order.push(node);
   };
   for (const root of roots) visit(root);

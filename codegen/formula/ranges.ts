@@ -74,7 +74,7 @@ export class Ranges {
       case 'offset': // |E - M| = |e sin E| <= e
         return interval.set(r, slot, -r.hi[c]!, r.hi[c]!);
       case 'kepler':
-        return interval.set(r, slot, r.lo[a]! - r.hi[b]!, r.hi[a]! + r.hi[b]!);
+        return interval.keplerE(r, slot, a, b);
       case 'mul':
         return a === b ? interval.sqr(r, slot, a) : interval.mul(r, slot, a, b);
       case 'select':

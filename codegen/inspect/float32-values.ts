@@ -40,7 +40,8 @@ export function float32Variables(unit: Unit): Set<ts.Symbol> {
     ts.forEachChild(node, visit);
   };
   visit(unit.source);
-  const variables = new Set(sources.keys());
+  const known = [...sources].filter(([, values]) => values.length > 0); // not one that is only declared
+  const variables = new Set(known.map(([symbol]) => symbol));
   for (let size = -1; size !== variables.size; ) {
     size = variables.size;
     for (const [symbol, values] of sources) {

@@ -67,8 +67,9 @@ export function hazardFaults(unit: Unit, fn: OwnFunction): Fault[] {
           `the index ${excerpt(node.argumentExpression)} may be no number`,
         );
       }
-    } else if (ts.isComputedPropertyName(node)) add(computedName, node, 'a property with a computed name');
-    else if (ts.isBinaryExpression(node)) {
+    } else if (ts.isComputedPropertyName(node)) {
+      if (!isFixedIndex(unit, node.expression)) add(computedName, node, 'a property with a computed name');
+    } else if (ts.isBinaryExpression(node)) {
       const operator = ts.tokenToString(node.operatorToken.kind) ?? '';
       if (operator === '==' || operator === '!=') add(looseEquality, node, `a comparison by ${operator}`);
       else if (outsideBinary.has(operator)) add(outsideOperator, node, `the operator ${operator}`);

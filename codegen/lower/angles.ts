@@ -38,6 +38,11 @@ export class AngleRules {
     return { ...formula, outputs, labels };
   }
 
+  /** All turns that the rules made: pairs whose squares add up to one in exact arithmetic. */
+  pairs(): readonly Turn[] {
+    return [...this.turns.values()];
+  }
+
   /** A node with all sines, cosines and anomalies below it rewritten. */
   rewrite(node: Node): Node {
     const known = this.rewritten.get(node);
@@ -131,6 +136,7 @@ export class AngleRules {
     return {
       cos: graph.make('sub', graph.make('mul', a.cos, b.cos), graph.make('mul', a.sin, b.sin)),
       sin: graph.make('add', graph.make('mul', a.sin, b.cos), graph.make('mul', a.cos, b.sin)),
+      parts: [a, b],
     };
   }
 
@@ -176,7 +182,11 @@ export class AngleRules {
             graph.make('mul', this.rewrite(orbit.e), this.turn(orbit.E).cos),
           );
     const inverse = graph.make('div', graph.constant(1), length);
-    return { cos: graph.make('mul', cosine, inverse), sin: graph.make('mul', sine, inverse) };
+    const turn = { cos: graph.make('mul', cosine, inverse), sin: graph.make('mul', sine, inverse) };
+    if (orbit === undefined) return turn;
+    const E = this.turn(orbit.E);
+    const scaled = graph.make('mul', E.sin, inverse);
+    return { ...turn, anomaly: { E, e: this.rewrite(orbit.e), root: this.rewrite(orbit.root), sine: scaled } };
   }
 }
 
@@ -204,7 +214,7 @@ function holdsDirection(angle: Node): boolean {
 }
 
 /** Recognises y = sqrt(1 - e e) sin E and x = cos E - e. */
-function trueAnomaly(y: Node, x: Node): { E: Node; e: Node } | undefined {
+function trueAnomaly(y: Node, x: Node): { E: Node; e: Node; root: Node } | undefined {
   if (x.operation !== 'sub' || x.args[0]?.operation !== 'cos' || y.operation !== 'mul') return undefined;
   const E = x.args[0].args[0]!;
   const e = x.args[1]!;
@@ -219,5 +229,6 @@ function trueAnomaly(y: Node, x: Node): { E: Node; e: Node } | undefined {
   };
   const isSine = (node: Node) => node.operation === 'sin' && node.args[0] === E;
   const [a, b] = y.args as [Node, Node];
-  return (isRoot(a) && isSine(b)) || (isRoot(b) && isSine(a)) ? { E, e } : undefined;
+  if (isRoot(a) && isSine(b)) return { E, e, root: a };
+  return isRoot(b) && isSine(a) ? { E, e, root: b } : undefined;
 }

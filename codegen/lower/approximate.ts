@@ -5,10 +5,10 @@ import type { Formula, Node } from '../formula/node.ts';
 import type { Ranges } from '../formula/ranges.ts';
 import type { Choices, Format } from '../kernel/choices.ts';
 import type { Replacement } from './rule.ts';
-import { iterateRanges, iterates } from './solver.ts';
+import { iterateSizes, iterates } from './solver.ts';
 
 /** Angles up to this size take a polynomial as they are; larger ones are reduced to a quarter turn. */
-const LARGEST_PLAIN_RADIUS = 1.6;
+const LARGEST_PLAIN_RADIUS = 1.2;
 
 /** Room for rounding in the argument of a polynomial, relative. */
 const PADDING = 1 + 2 ** -16;
@@ -18,6 +18,10 @@ export interface Approximated {
   readonly formula: Formula;
   /** By node of the exact formula (its arguments exact too): what replaced it. */
   readonly replacements: ReadonlyMap<Node, Replacement>;
+  /** By node of the exact formula: the node of the plain formula that stands for it. */
+  readonly plain: ReadonlyMap<Node, Node>;
+  /** Iterates of each capped solver, by the node of Kepler's equation: nodes of the exact formula. */
+  readonly iterates: ReadonlyMap<Node, readonly Node[]>;
 }
 
 /**
@@ -37,12 +41,13 @@ export function approximate(graph: Graph, formula: Formula, ranges: Ranges, choi
     const kept = pass.done.get(node);
     if (kept !== undefined && kept.args.length > 0 && !labels.has(kept)) labels.set(kept, label);
   }
-  return { formula: { ...formula, outputs, labels }, replacements: pass.replacements };
+  return { formula: { ...formula, outputs, labels }, replacements: pass.replacements, plain: pass.done, iterates: pass.iterates };
 }
 
 class Pass {
   readonly done = new Map<Node, Node>();
   readonly replacements = new Map<Node, Replacement>();
+  readonly iterates = new Map<Node, readonly Node[]>();
   private readonly reductions = new Map<Node, Reduction>();
   private readonly graph: Graph;
   private readonly ranges: Ranges;
@@ -70,7 +75,7 @@ class Pass {
       case 'cos':
         return this.turn(node, args[0]!);
       case 'offset':
-        return this.offset(node, args);
+        return this.offset(node);
       default:
         return this.graph.make(node.operation, ...args);
     }
@@ -83,7 +88,7 @@ class Pass {
       radius <= LARGEST_PLAIN_RADIUS
         ? this.plain(node, x, radius, format)
         : this.reduced(node, x, radius, format);
-    this.replacements.set(node, { node: made, error });
+    this.replacements.set(node, { node: made, error, radius });
     return made;
   }
 
@@ -104,11 +109,11 @@ class Pass {
     return { node: made, error: Math.max(sin.error, cos.error) + reduction.error };
   }
 
-  private offset(node: Node, args: readonly Node[]): Node {
-    const exact = this.graph.make('offset', ...args);
-    const list = iterates(this.graph, exact, this.choices);
-    const bounds = iterateRanges(exact, list, this.ranges.of(node.args[2]!));
-    for (const [k, iterate] of list.entries()) this.ranges.assert(iterate, bounds[k]!);
+  private offset(node: Node): Node {
+    const list = iterates(this.graph, node, this.choices);
+    this.iterates.set(node, list);
+    const sizes = iterateSizes(node, list, this.ranges.of(node.args[2]!));
+    for (const [k, iterate] of list.entries()) this.ranges.assert(iterate, { lo: -sizes[k]!, hi: sizes[k]! });
     return this.visit(list.at(-1)!);
   }
 }

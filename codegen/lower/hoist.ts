@@ -1,11 +1,17 @@
 import type { Graph } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
 
+/** A formula after the rule, and where its nodes went. */
+export interface Hoisted {
+  readonly formula: Formula;
+  readonly moved: ReadonlyMap<Node, Node>;
+}
+
 /**
  * Exact rule for products: (a b) c = (a c) b. The factors of a product of the tick that setup knows are
  * multiplied there.
  */
-export function hoistProducts(graph: Graph, formula: Formula): Formula {
+export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
   const done = new Map<Node, Node>();
   const hoist = (node: Node): Node => {
     const known = done.get(node);
@@ -30,7 +36,7 @@ export function hoistProducts(graph: Graph, formula: Formula): Formula {
     const kept = done.get(node);
     if (kept !== undefined && !labels.has(kept)) labels.set(kept, label);
   }
-  return { ...formula, outputs, labels };
+  return { formula: { ...formula, outputs, labels }, moved: done };
 }
 
 /** The factors of a product of the tick; other nodes are their own factor. */

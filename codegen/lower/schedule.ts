@@ -6,6 +6,12 @@ import type { Choices, Format } from '../kernel/choices.ts';
 import type { Kernel, Line, Operation } from '../kernel/kernel.ts';
 import { nameLines } from './names.ts';
 
+/** A kernel and the line that computes each node, before any rounding to another format. */
+export interface Scheduled {
+  readonly kernel: Kernel;
+  readonly lineOf: ReadonlyMap<Node, number>;
+}
+
 /**
  * Turns a formula of plain arithmetic into a kernel: every node one line of its stage's arithmetic, arguments
  * before users, setup before tick; the state holds the values of setup that the tick reads.
@@ -15,7 +21,12 @@ import { nameLines } from './names.ts';
  * @param choices arithmetic of the stages
  * @param domain checked ranges of the elements and of t
  */
-export function schedule(formula: Formula, ranges: Ranges, choices: Choices, domain: Domain): Kernel {
+export function schedule(
+  formula: Formula,
+  ranges: Ranges,
+  choices: Choices,
+  domain: Domain,
+): Scheduled {
   const scheduler = new Scheduler(choices);
   const outputs = formula.outputs.map(({ group, name, unit, node }) => ({
     group,
@@ -34,7 +45,7 @@ export function schedule(formula: Formula, ranges: Ranges, choices: Choices, dom
     moved,
     placed.map((output) => output.line),
   );
-  return {
+  const kernel: Kernel = {
     model: formula.name,
     choices,
     domain,
@@ -44,6 +55,7 @@ export function schedule(formula: Formula, ranges: Ranges, choices: Choices, dom
     guard: state.findIndex((line) => ranges.of(moved[line]!.node).lo > 0),
     outputs: placed,
   };
+  return { kernel, lineOf: new Map([...scheduler.lineOf].map(([node, line]) => [node, at(line)])) };
 }
 
 /** Setup values that the tick reads, in the order of first use. */
@@ -65,7 +77,7 @@ function byStage(lines: readonly Line[]): { lines: readonly Line[]; order: reado
 
 class Scheduler {
   readonly lines: Line[] = [];
-  private readonly lineOf = new Map<Node, number>();
+  readonly lineOf = new Map<Node, number>();
   private readonly rounded = new Map<number, number>();
   private readonly constants = new Map<string, number>();
   private readonly choices: Choices;

@@ -44,6 +44,11 @@ const bodies: readonly (readonly [statements: string, counts: Counts])[] = [
   // Four rounds: the test runs five times, the step four times.
   ['for (let i = 0; i < 4; i++) p[i] = a * b;', { compare: 5, add: 4, mul: 4, store: 4 }],
   ['for (let i = 6; i >= 0; i -= 3) p[i] = -a;', { compare: 4, sub: 3, neg: 3, store: 3 }],
+  ['for (let i = 0; i <= 7; i += 2) p[i] = -a;', { compare: 5, add: 4, neg: 4, store: 4 }],
+  ['for (let i = 3; i > 0; --i) p[i] = -a;', { compare: 4, sub: 3, neg: 3, store: 3 }],
+  ['for (let i = 3; 0 < i; i = i - 2) p[i] = -a;', { compare: 3, sub: 2, neg: 2, store: 2 }],
+  ['for (let i = 0; 4 >= i; i += 1) p[i] = -a;', { compare: 6, add: 5, neg: 5, store: 5 }],
+  ['for (let i = 0; i < 7; ++i) p[i] = -a;', { compare: 8, add: 7, neg: 7, store: 7 }],
   ['for (let i = 0; i < 0; i++) p[i] = a * b;', { compare: 1 }],
   [
     'for (let i = 0; i < 2; i++) for (let j = 0; j < 3; j++) p[j] = a * b;',
@@ -134,6 +139,7 @@ describe('counts that are a lower bound', () => {
     'throw a;',
     'return sine(a);',
     'const [x] = p; return x;',
+    'const { x, ...y } = q; return x === y;',
     'return "n" + a;',
     'return 2n * 3n;',
     'using x = p; return x;',
@@ -141,6 +147,24 @@ describe('counts that are a lower bound', () => {
     const text = `${frame(statements)} function sine(x: number) { return Math.sin(x); }`;
     expect(functionsOf(text).find(({ name }) => name === 'counted')).toMatchObject({ complete: false });
   });
+});
+
+describe('what is only created', () => {
+  it.each([
+    'return () => a + b;',
+    'return p.x === a ? class { m() { return a + b; } } : 0;',
+    'p(function () { -a; });',
+  ])('does not run: %s', (statements) => {
+    const counted = functionsOf(frame(statements)).find(({ name }) => name === 'counted');
+    expect(counted).toMatchObject({ complete: false, operations: { add: 0, neg: 0 } });
+  });
+
+  it.each(['async function f() {}', 'function* f() {}', 'function f(...x) {}'])(
+    'makes a lower bound: %s',
+    (text) => {
+      expect(functionsOf(text)).toMatchObject([{ complete: false }]);
+    },
+  );
 });
 
 describe('functions', () => {

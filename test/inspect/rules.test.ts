@@ -34,6 +34,17 @@ describe('source that the settings of this project refuse', () => {
   });
 });
 
+describe('messages', () => {
+  it('tell direct recursion from mutual', () => {
+    const text = 'function a() { a(); }\nfunction b() { c(); }\nfunction c() { b(); }';
+    expect(inspectSource('circle.js', text).findings.map(({ what }) => what)).toEqual([
+      'a calls itself',
+      'b calls c, which leads back to it',
+      'c calls b, which leads back to it',
+    ]);
+  });
+});
+
 describe('case files', () => {
   it('seed at least one fault each, but for the clean ones', () => {
     const unseeded = cases.filter(({ expected }) => expected.length === 0).map(({ file }) => file);

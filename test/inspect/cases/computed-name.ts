@@ -6,5 +6,6 @@ export function find(o: Record<string, number>, name: string, list: number[], k:
   //          ^ inspect.computed-name
   const { [name]: b } = o;
   //      ^ inspect.computed-name
-  return a! + b! + o[key]! + o['e']! + list[k]! + list[third]! + list[k + 1]! + list[Math.floor(k)]!;
+  const { [key]: c } = o;
+  return a! + b! + c! + o[key]! + o['e']! + list[k]! + list[third]! + list[k + 1]! + list[Math.floor(k)]!;
 }

@@ -12,6 +12,11 @@ export function spreads(f, xs) {
   let b = 0;
   [b] = xs;
 //^ inspect.iteration
+  ({ a: [b] } = xs);
+  //    ^ inspect.iteration
+  [...[b]] = xs;
+//^ inspect.iteration
+  //  ^ inspect.iteration
   return a + b + all[0];
 }
 

@@ -11,8 +11,12 @@ export function point(x, y) {
 export function unpack(p) {
   let x = 0;
   ({ x } = p);
+  let z = 0;
+  ({ a: { x }, b: { z } = p } = p);
+  for ({ z } of p) x = z;
+//^ inspect.iteration inspect.unbounded-loop
   const { y } = p;
-  return x + y;
+  return x + y + z;
 }
 
 export const nested = (t) => ({ a: { t } });

@@ -1,10 +1,19 @@
 export function rest(p) {
   const { x, ...others } = p;
   //         ^ inspect.object-rest
-  return x + others.y;
+  let more = x;
+  ({ x: more, ...others.rest } = p);
+  //          ^ inspect.object-rest
+  return more + others.y;
 }
 
 export function parts(p) {
   const { x, y: z } = p;
   return x + z;
+}
+
+// The copy is the object literal's.
+export function copy(p) {
+  return { ...p };
+  //     ^ inspect.object-literal
 }

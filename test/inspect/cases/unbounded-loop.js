@@ -34,6 +34,23 @@ export function old(out) {
   for (i = 0; i < 4; i++) out[i] = -i;
 }
 
+export function steps(out, n) {
+  for (let i = 0; i < 8; ++i) out[i] = 0;
+  for (let i = 8; i > 0; --i) out[i] = 0;
+  for (let i = 1; i < 8; i *= 2) out[i] = 0;
+//^ inspect.unbounded-loop
+  for (let i = 1; i < 8; i = 2 * i) out[i] = 0;
+//^ inspect.unbounded-loop
+  for (let i = 1; i < 8; i = n) out[i] = 0;
+//^ inspect.unbounded-loop
+  for (let i = 1; i < 8; n += 1) out[i] = 0;
+//^ inspect.unbounded-loop
+  for (let i = 1; i < 8; n++) out[i] = 0;
+//^ inspect.unbounded-loop
+  for (let i = 1; i < 8; ) out[i] = 0;
+//^ inspect.unbounded-loop
+}
+
 export function index(out) {
   for (let i = 0; i < 8; i++) {
 //^ inspect.unbounded-loop
