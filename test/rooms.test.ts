@@ -12,7 +12,7 @@ const ROWS: readonly (readonly string[])[] = [
   ['read', 'kernel'],
   ['approximate'],
   ['lower'],
-  ['emit', 'cost', 'observe', 'inspect'],
+  ['emit', 'cost', 'observe', 'inspect', 'parse', 'bound'],
   ['choose'],
   ['certificate'],
   ['command'],

@@ -74,10 +74,22 @@ export class Backward {
     interval.set(w, C, value.lo[orbit.i]!, value.hi[orbit.i]!);
     interval.set(w, S, sine.lo[orbit.i]!, sine.hi[orbit.i]!);
     const { mid, rad, midT, radT } = this;
-    const put = (entry: number, axis: number, sign: 1 | -1, factors: readonly number[], tangential = false) => {
+    const put = (
+      entry: number,
+      axis: number,
+      sign: 1 | -1,
+      factors: readonly number[],
+      tangential = false,
+    ) => {
       interval.set(w, 5, sign, sign);
       for (const factor of factors) interval.mul(w, 5, 5, factor);
-      this.seed(tangential ? midT : mid, tangential ? radT : rad, entry * this.count + axis, w.lo[5]!, w.hi[5]!);
+      this.seed(
+        tangential ? midT : mid,
+        tangential ? radT : rad,
+        entry * this.count + axis,
+        w.lo[5]!,
+        w.hi[5]!,
+      );
     };
     put(orbit.r, 0, 1, []);
     put(orbit.u, 0, 1, [r]);
@@ -155,10 +167,17 @@ export class Backward {
             return this.quotient(k, a, b);
           case 'sqrt': {
             const [least, most] = [2 * lo[k]!, 2 * hi[k]!];
-            return least > 0 ? this.real(k, a, (1 - 2 * ULP) / most, (1 + 2 * ULP) / least) : this.real(k, a, 0, Infinity);
+            return least > 0
+              ? this.real(k, a, (1 - 2 * ULP) / most, (1 + 2 * ULP) / least)
+              : this.real(k, a, 0, Infinity);
           }
           case 'abs':
-            return this.real(k, a, hi[a]! < 0 ? -1 : lo[a]! >= 0 ? 1 : -1, lo[a]! > 0 ? 1 : hi[a]! <= 0 ? -1 : 1);
+            return this.real(
+              k,
+              a,
+              hi[a]! < 0 ? -1 : lo[a]! >= 0 ? 1 : -1,
+              lo[a]! > 0 ? 1 : hi[a]! <= 0 ? -1 : 1,
+            );
           case 'select':
             if (hi[a]! < lo[b]!) return this.real(k, x, 1, 1);
             if (lo[a]! >= hi[b]!) return this.real(k, y, 1, 1);
@@ -230,7 +249,8 @@ export class Backward {
     const { mid, rad, midT, radT, count } = this;
     const leak = this.leak(k);
     this.spread(midT, radT, k, mid, rad, angle, 1, 1);
-    for (let i = 0, from = k * count, to = angle * count; i < count; i++, from++, to++) rad[to]! += this.total(from) * leak;
+    for (let i = 0, from = k * count, to = angle * count; i < count; i++, from++, to++)
+      rad[to]! += this.total(from) * leak;
   }
 
   /**
@@ -259,7 +279,16 @@ export class Backward {
     const pass = (fromT: boolean, to: number, toT: boolean, sign: 1 | -1, factors: readonly number[]) => {
       interval.set(w, T, sign, sign);
       for (const factor of factors) interval.mul(w, T, T, factor);
-      this.spread(fromT ? midT : mid, fromT ? radT : rad, k, toT ? midT : mid, toT ? radT : rad, to, w.lo[T]!, w.hi[T]!);
+      this.spread(
+        fromT ? midT : mid,
+        fromT ? radT : rad,
+        k,
+        toT ? midT : mid,
+        toT ? radT : rad,
+        to,
+        w.lo[T]!,
+        w.hi[T]!,
+      );
     };
     pass(false, turn, false, 1, [D, D]);
     pass(true, turn, true, 1, [D]);

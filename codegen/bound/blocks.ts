@@ -1,5 +1,5 @@
-import { Ranges } from '../formula/ranges.ts';
 import type { Node } from '../formula/node.ts';
+import { Ranges } from '../formula/ranges.ts';
 import type { Lowered } from '../lower/lower.ts';
 import { type Blocks, roundLineOf } from './build.ts';
 import { sineErrors } from './sine-block.ts';

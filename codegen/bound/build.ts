@@ -1,6 +1,6 @@
 import { InputError } from '../../src/finding.ts';
-import { inOrder } from '../formula/graph.ts';
 import { Evaluator } from '../formula/evaluate.ts';
+import { inOrder } from '../formula/graph.ts';
 import type { Node } from '../formula/node.ts';
 import type { Format } from '../kernel/choices.ts';
 import type { Kernel } from '../kernel/kernel.ts';
@@ -64,9 +64,12 @@ export class Builder {
 
   /** The tape of one output group of the kernel. */
   static ofGroup(lowered: Lowered, blocks: Blocks, group: string): Tape {
-    const outputs = lowered.exact.outputs.filter((output) => output.group === group).map((output) => output.node);
+    const outputs = lowered.exact.outputs
+      .filter((output) => output.group === group)
+      .map((output) => output.node);
     const builder = new Builder(lowered, blocks, inOrder(lowered.exact.outputs.map((output) => output.node)));
-    const rotation = outputs.length === 3 ? findRotation(lowered.graph, builder.turns, outputs[0]!, outputs[1]!) : undefined;
+    const rotation =
+      outputs.length === 3 ? findRotation(lowered.graph, builder.turns, outputs[0]!, outputs[1]!) : undefined;
     if (rotation === undefined) return builder.tape(outputs.map((node) => builder.real(node, 'tick')));
     const nodes = [rotation.X, rotation.Y, outputs[2]!] as const;
     const [X, Y, Z] = nodes.map((node) => builder.real(node, 'tick')) as [number, number, number];
@@ -106,7 +109,12 @@ export class Builder {
     const own = this.own(node);
     const format = node.operation === 'input' ? 'f64' : this.formatOf(stageOf(node));
     if (this.blocks === null || format === this.formatOf(stage)) return own;
-    return this.once(`round ${own}`, () => ({ kind: 'round', args: [own], format: 'f32', line: this.roundLine(node) }));
+    return this.once(`round ${own}`, () => ({
+      kind: 'round',
+      args: [own],
+      format: 'f32',
+      line: this.roundLine(node),
+    }));
   }
 
   /** The entry of a turn as a line of the given stage reads it. */
@@ -130,8 +138,14 @@ export class Builder {
       const kind = realKind(node);
       const line = this.line(node);
       // a node that no line computes stands for its exact value, made of the values of its arguments before any rounding
-      if (line < 0 || this.blocks === null) return { kind, args: node.args.map((arg) => this.unrounded(arg)), format: 'exact', line };
-      return { kind, args: node.args.map((arg) => this.real(arg, stage)), format: this.formatOf(stage), line };
+      if (line < 0 || this.blocks === null)
+        return { kind, args: node.args.map((arg) => this.unrounded(arg)), format: 'exact', line };
+      return {
+        kind,
+        args: node.args.map((arg) => this.real(arg, stage)),
+        format: this.formatOf(stage),
+        line,
+      };
     });
   }
 
@@ -146,7 +160,14 @@ export class Builder {
       }
       if (turn.factors !== undefined) {
         const args = turn.factors.map((factor) => this.ownTurn(factor)) as unknown as [number, number];
-        return { kind: 'product', args, format, line, sinLine, errors: this.blocks === null ? null : this.productErrors(turn, args) };
+        return {
+          kind: 'product',
+          args,
+          format,
+          line,
+          sinLine,
+          errors: this.blocks === null ? null : this.productErrors(turn, args),
+        };
       }
       if (turn.anomaly !== undefined) {
         const { E, e, root, sine } = turn.anomaly;
@@ -156,7 +177,9 @@ export class Builder {
           [e, this.leaf(this.real(e, stage), 'value', e)],
           [root, this.leaf(this.unrounded(root), 'value', root)],
         ]);
-        const lines = [turn.cos, this.lowered.graph.make('mul', root, sine)].map((node) => this.loose(node, stage, leaves));
+        const lines = [turn.cos, this.lowered.graph.make('mul', root, sine)].map((node) =>
+          this.loose(node, stage, leaves),
+        );
         return {
           kind: 'anomaly',
           turn: this.ownTurn(E),
@@ -166,7 +189,8 @@ export class Builder {
           line,
         };
       }
-      if (turn.angle === undefined) return { kind: 'pair', args: [this.unrounded(turn.cos), this.unrounded(turn.sin)], line };
+      if (turn.angle === undefined)
+        return { kind: 'pair', args: [this.unrounded(turn.cos), this.unrounded(turn.sin)], line };
       const errors = this.given.get(turn) ?? this.blocks?.sine(turn) ?? null;
       return { kind: 'turn', angle: this.real(turn.angle, stage), errors, line, sinLine };
     });
@@ -174,7 +198,12 @@ export class Builder {
 
   /** The value of an entry, for lines whose own errors are wanted but not those of what they read. */
   private leaf(of: number, component: 'value' | 'sine', node: Node): number {
-    return this.once(`leaf ${of} ${component}`, () => ({ kind: 'leaf', of, component, line: this.line(node) }));
+    return this.once(`leaf ${of} ${component}`, () => ({
+      kind: 'leaf',
+      of,
+      component,
+      line: this.line(node),
+    }));
   }
 
   /** The entry of a node whose lines are followed down to leaves, apart from all other entries. */
@@ -185,7 +214,12 @@ export class Builder {
     return this.once(`loose ${this.id(node)}`, () => {
       const line = this.line(node);
       const args = node.args.map((arg) => this.loose(arg, stage, leaves));
-      return { kind: realKind(node), args, format: line < 0 || this.blocks === null ? 'exact' : this.formatOf(stage), line };
+      return {
+        kind: realKind(node),
+        args,
+        format: line < 0 || this.blocks === null ? 'exact' : this.formatOf(stage),
+        line,
+      };
     });
   }
 
@@ -197,14 +231,23 @@ export class Builder {
       if (entry.kind === 'pair') entry.args.forEach(collect);
       else if (entry.kind === 'anomaly') entry.lines.forEach(collect);
       else if (entry.kind === 'turn' || entry.kind === 'product' || entry.kind === 'rounded-turn') {
-        reads.push({ entry: index, component: 'value', line: entry.line }, { entry: index, component: 'sine', line: entry.sinLine });
+        reads.push(
+          { entry: index, component: 'value', line: entry.line },
+          { entry: index, component: 'sine', line: entry.sinLine },
+        );
       } else if (entry.line >= 0) reads.push({ entry: index, component: 'value', line: entry.line });
       else if ('args' in entry) entry.args.forEach(collect);
     };
     args.forEach(collect);
-    const distinct = reads.filter(({ line }, k) => line >= 0 && reads.findIndex((other) => other.line === line) === k);
+    const distinct = reads.filter(
+      ({ line }, k) => line >= 0 && reads.findIndex((other) => other.line === line) === k,
+    );
     const { kernel } = this.lowered;
-    const tape = new LineTape(kernel, distinct.map(({ line }) => line), [this.line(turn.cos), this.line(turn.sin)]);
+    const tape = new LineTape(
+      kernel,
+      distinct.map(({ line }) => line),
+      [this.line(turn.cos), this.line(turn.sin)],
+    );
     return { reads: distinct, errors: (lo, hi) => tape.errors(lo, hi) };
   }
 
@@ -212,7 +255,7 @@ export class Builder {
     const [sinM, cosM, e] = node.args as [Node, Node, Node];
     const turn = this.turnOf.get(sinM);
     if (turn === undefined || turn.sin !== sinM || turn.cos !== cosM) {
-      throw unsupported('Kepler\'s equation of a mean anomaly whose sine and cosine are no turn');
+      throw unsupported("Kepler's equation of a mean anomaly whose sine and cosine are no turn");
     }
     return {
       kind: 'offset',
@@ -230,7 +273,12 @@ export class Builder {
       evaluator.run({});
       const exact = evaluator.value(node);
       const value = format === 'f32' && this.blocks !== null ? Math.fround(exact.hi) : exact.hi;
-      return { kind: 'constant', value, error: Math.abs(value - exact.hi - exact.lo) * (1 + 2 ** -50), line: -1 };
+      return {
+        kind: 'constant',
+        value,
+        error: Math.abs(value - exact.hi - exact.lo) * (1 + 2 ** -50),
+        line: -1,
+      };
     });
   }
 
@@ -274,7 +322,8 @@ function stageOf(node: Node): Stage {
 const REAL_KINDS: readonly string[] = ['add', 'sub', 'mul', 'div', 'neg', 'sqrt', 'abs', 'select'];
 
 function realKind(node: Node): RealKind {
-  if (!REAL_KINDS.includes(node.operation)) throw unsupported(`the operation ${node.operation} outside a block`);
+  if (!REAL_KINDS.includes(node.operation))
+    throw unsupported(`the operation ${node.operation} outside a block`);
   return node.operation as RealKind;
 }
 

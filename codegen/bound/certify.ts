@@ -32,7 +32,11 @@ export interface GroupProof {
  * @param progress told the share done, from 0 to 1
  * @throws InputError with code bound.unsupported or bound.block for a kernel that the proof does not cover
  */
-export function certify(lowered: Lowered, effort: ProofEffort = PROOF_EFFORT, progress: (share: number) => void = () => {}): readonly GroupProof[] {
+export function certify(
+  lowered: Lowered,
+  effort: ProofEffort = PROOF_EFFORT,
+  progress: (share: number) => void = () => {},
+): readonly GroupProof[] {
   const blocks = new KernelBlocks(lowered);
   const groups = [...new Set(lowered.exact.outputs.map((output) => output.group))];
   return groups.map((group, index) => {

@@ -58,8 +58,16 @@ export class ErrorVector {
     const { entries } = this.forward.tape;
     for (let k = 0; k < entries.length; k++) {
       const kind = entries[k]!.kind;
-      if (kind === 'turn' || kind === 'product' || kind === 'rounded-turn' || kind === 'pair' || kind === 'anomaly') this.collectTurn(k);
-      else if (this.forward.local[k]! > 0 && this.twins[k] !== -2) this.collectReal(k, this.forward.local[k]!);
+      if (
+        kind === 'turn' ||
+        kind === 'product' ||
+        kind === 'rounded-turn' ||
+        kind === 'pair' ||
+        kind === 'anomaly'
+      )
+        this.collectTurn(k);
+      else if (this.forward.local[k]! > 0 && this.twins[k] !== -2)
+        this.collectReal(k, this.forward.local[k]!);
     }
     this.ball = this.rotationError();
   }
@@ -86,7 +94,8 @@ export class ErrorVector {
     const [a, b] = [local[k]!, localSine[k]!];
     if (a === 0 && b === 0) return;
     const grow = 1 + 4 * deviation[k]!;
-    if (this.free[k] || angle.hi[k]! - angle.lo[k]! > WIDE_ANGLE) return this.collectPair(k, Math.sqrt(a * a + b * b) * grow);
+    if (this.free[k] || angle.hi[k]! - angle.lo[k]! > WIDE_ANGLE)
+      return this.collectPair(k, Math.sqrt(a * a + b * b) * grow);
     this.collectComponent(k, a * grow, value.lo[k]!, value.hi[k]!, -sine.hi[k]!, -sine.lo[k]!);
     this.collectComponent(k, b * grow, sine.lo[k]!, sine.hi[k]!, value.lo[k]!, value.hi[k]!);
   }
@@ -100,7 +109,11 @@ export class ErrorVector {
     for (let i = 0; i < count; i++) {
       const j = k * count + i;
       this.terms[at + i] = (mid[j]! * r + midT[j]! * t) * local;
-      const spread = Math.abs(mid[j]!) * dr + rad[j]! * (Math.abs(r) + dr) + Math.abs(midT[j]!) * dt + radT[j]! * (Math.abs(t) + dt);
+      const spread =
+        Math.abs(mid[j]!) * dr +
+        rad[j]! * (Math.abs(r) + dr) +
+        Math.abs(midT[j]!) * dt +
+        radT[j]! * (Math.abs(t) + dt);
       this.rest[i]! += spread * local;
     }
     this.owners[this.size++] = k;
@@ -138,7 +151,8 @@ export class ErrorVector {
     let sum = this.ball;
     const [w0, w1 = 0, w2 = 0] = w as [number, number?, number?];
     const { terms, pairs } = this;
-    for (let k = 0, at = 0; k < this.size; k++, at += 3) sum += Math.abs(w0 * terms[at]! + w1 * terms[at + 1]! + w2 * terms[at + 2]!);
+    for (let k = 0, at = 0; k < this.size; k++, at += 3)
+      sum += Math.abs(w0 * terms[at]! + w1 * terms[at + 1]! + w2 * terms[at + 2]!);
     for (let k = 0, at = 0; k < this.pairSize; k++, at += 6) {
       const p = w0 * pairs[at]! + w1 * pairs[at + 1]! + w2 * pairs[at + 2]!;
       const q = w0 * pairs[at + 3]! + w1 * pairs[at + 4]! + w2 * pairs[at + 5]!;
@@ -192,7 +206,9 @@ export class ErrorVector {
   private frameGrowth(): number {
     const { node, orbit } = this.forward.tape;
     const { deviation } = this.forward;
-    const off = (node === null ? 0 : deviation[node.turn]!) + (orbit === null ? 0 : deviation[orbit.u]! + deviation[orbit.i]!);
+    const off =
+      (node === null ? 0 : deviation[node.turn]!) +
+      (orbit === null ? 0 : deviation[orbit.u]! + deviation[orbit.i]!);
     return 1 + 4 * off;
   }
 }
@@ -202,7 +218,8 @@ function twinsOf(entries: readonly Entry[]): Int32Array {
   const twins = new Int32Array(entries.length).fill(-1);
   const first = new Map<number, number>();
   for (const [k, entry] of entries.entries()) {
-    if (entry.line < 0 || !('format' in entry) || entry.kind === 'product' || entry.kind === 'offset') continue;
+    if (entry.line < 0 || !('format' in entry) || entry.kind === 'product' || entry.kind === 'offset')
+      continue;
     const known = first.get(entry.line);
     if (known === undefined) first.set(entry.line, k);
     else if (twins[known] === -1) {

@@ -1,13 +1,11 @@
 import * as interval from '../numbers/interval.ts';
 import { freeTurns } from './free-turns.ts';
-import { exactUpTo, gridOf, halfUnit, LEAST, leadingPower } from './rounding.ts';
+import { RealRanges, SLACK } from './real-ranges.ts';
+import { halfUnit } from './rounding.ts';
 import type { Entry, Tape } from './tape.ts';
 
 /** More than half a turn: an angle that may be any. */
 const WHOLE = 3.2;
-
-/** Room for the rounding of the analysis in sums of error bounds. */
-const SLACK = 1 + 2 ** -40;
 
 /**
  * Ranges and local errors of all entries of a tape over one box.
@@ -16,20 +14,14 @@ const SLACK = 1 + 2 ** -40;
  * the entry's own error, so what it is made from has been widened before. A turn has a range of angles and a deviation:
  * the computed point lies within that distance of a point of the unit circle at one of the angles.
  */
-export class Forward {
+export class Forward extends RealRanges {
   readonly tape: Tape;
-  /** Ranges of real entries; of turns: the range of the cosine. */
-  readonly value: interval.Intervals;
   /** Ranges of the sines of turns. */
   readonly sine: interval.Intervals;
   /** Ranges of the angles of turns. */
   readonly angle: interval.Intervals;
-  /** Local error of real entries; of turns: of the cosine. */
-  readonly local: Float64Array;
   /** Local error of the sine of turns. */
   readonly localSine: Float64Array;
-  /** Bound on |computed - exact| of real entries; of turns: of the angle. Running error analysis: crude, but always there. */
-  readonly error: Float64Array;
   /** Distance of the computed point of a turn from the unit circle at its angle. */
   readonly deviation: Float64Array;
   private readonly work: interval.Intervals;
@@ -45,19 +37,19 @@ export class Forward {
    */
   constructor(tape: Tape, variables: readonly string[], cuts: readonly number[]) {
     const n = tape.entries.length;
+    super(n);
     this.tape = tape;
-    this.value = new interval.Intervals(n);
     this.sine = new interval.Intervals(n);
     this.angle = new interval.Intervals(n);
-    this.local = new Float64Array(n);
     this.localSine = new Float64Array(n);
-    this.error = new Float64Array(n);
     this.deviation = new Float64Array(n);
     this.work = new interval.Intervals(8);
     this.names = new Map(variables.map((name, index) => [name, index]));
     this.cutOf = new Map(cuts.map((entry, index) => [entry, variables.length + index]));
     this.free = freeTurns(tape);
-    const used = new Set(tape.entries.flatMap((entry) => (entry.kind === 'cosine' || entry.kind === 'sine' ? [entry.turn] : [])));
+    const used = new Set(
+      tape.entries.flatMap((entry) => (entry.kind === 'cosine' || entry.kind === 'sine' ? [entry.turn] : [])),
+    );
     this.refinable = tape.entries.map(
       (entry, index) => entry.kind === 'turn' && entry.errors?.periodic === true && !used.has(index),
     );
@@ -122,120 +114,6 @@ export class Forward {
     }
   }
 
-  /** Widens a range by the entry's own error and keeps both errors. */
-  private finish(k: number, local: number, carried: number): void {
-    this.local[k] = local;
-    this.error[k] = (carried + local) * SLACK;
-    if (local > 0) {
-      this.value.lo[k] = interval.down(this.value.lo[k]! - local);
-      this.value.hi[k] = interval.up(this.value.hi[k]! + local);
-    }
-  }
-
-  private magnitude(k: number): number {
-    return Math.max(-this.value.lo[k]!, this.value.hi[k]!);
-  }
-
-  private real(k: number, entry: Extract<Entry, { readonly args: readonly number[]; readonly kind: string }>): void {
-    const r = this.value;
-    const [a, b = a, x = a, y = a] = entry.args as [number, number?, number?, number?];
-    const E = this.error;
-    switch (entry.kind) {
-      case 'add':
-      case 'sub': {
-        if (entry.kind === 'add') interval.add(r, k, a, b);
-        else interval.sub(r, k, a, b);
-        const local = this.sumError(k, entry, a, b);
-        if (local === 0) this.keepPoint(k, a, b, entry.kind === 'add' ? r.lo[a]! + r.lo[b]! : r.lo[a]! - r.lo[b]!);
-        return this.finish(k, local, E[a]! + E[b]!);
-      }
-      case 'mul': {
-        const carried = this.magnitude(a) * E[b]! + this.magnitude(b) * E[a]!;
-        if (a === b) interval.sqr(r, k, a);
-        else interval.mul(r, k, a, b);
-        const local = this.productError(k, entry, a, b);
-        if (local === 0) this.keepPoint(k, a, b, r.lo[a]! * r.lo[b]!);
-        return this.finish(k, local, carried);
-      }
-      case 'div': {
-        interval.div(r, k, a, b);
-        const least = Math.max(r.lo[b]!, -r.hi[b]!);
-        const carried = least > 0 ? (E[a]! + this.magnitude(k) * E[b]!) / least : Infinity;
-        return this.finish(k, this.roundingOf(k, entry.format), carried);
-      }
-      case 'sqrt': {
-        const least = Math.sqrt(Math.max(0, r.lo[a]!));
-        interval.sqrt(r, k, a);
-        return this.finish(k, this.roundingOf(k, entry.format), least > 0 ? E[a]! / least : Infinity);
-      }
-      case 'round': {
-        interval.set(r, k, r.lo[a]!, r.hi[a]!);
-        const point = r.lo[a]! === r.hi[a]! && E[a]! === 0;
-        const exact = point && Math.fround(r.lo[a]!) === r.lo[a]!;
-        return this.finish(k, exact ? 0 : halfUnit(this.magnitude(k), 'f32'), E[a]!);
-      }
-      case 'neg':
-        interval.neg(r, k, a);
-        return this.finish(k, 0, E[a]!);
-      case 'abs':
-        interval.abs(r, k, a);
-        return this.finish(k, 0, E[a]!);
-      case 'floor':
-        interval.floor(r, k, a);
-        return this.finish(k, 0, r.lo[k]! === r.hi[k]! ? 0 : Infinity);
-      case 'select': {
-        interval.select(r, k, a, b, x, y);
-        const decided = r.hi[a]! < r.lo[b]! ? x : r.lo[a]! >= r.hi[b]! ? y : -1;
-        return this.finish(k, 0, decided < 0 ? Infinity : E[decided]!);
-      }
-      default:
-        throw new Error(`no range for ${entry.kind}`);
-    }
-  }
-
-  /** Two known numbers whose result is exact give a known number. */
-  private keepPoint(k: number, a: number, b: number, result: number): void {
-    if (this.point(a) !== undefined && this.point(b) !== undefined) interval.set(this.value, k, result, result);
-  }
-
-  private roundingOf(k: number, format: 'f64' | 'f32' | 'exact'): number {
-    return format === 'exact' ? 0 : halfUnit(this.magnitude(k), format);
-  }
-
-  /**
-   * Rounding of a sum. It is never larger than either operand, since the other one is a candidate; and it is zero when
-   * both operands are multiples of a unit of which the format holds all multiples up to the result.
-   */
-  private sumError(k: number, entry: { readonly format: 'f64' | 'f32' | 'exact' }, a: number, b: number): number {
-    const { format } = entry;
-    if (format === 'exact') return 0;
-    const unit = Math.min(this.grid(a, format), this.grid(b, format));
-    if (unit > 0 && this.magnitude(k) <= exactUpTo(unit, format)) return 0;
-    return Math.min(halfUnit(this.magnitude(k), format), this.magnitude(a), this.magnitude(b));
-  }
-
-  private grid(k: number, format: 'f64' | 'f32'): number {
-    return gridOf(this.value.lo[k]!, this.value.hi[k]!, format);
-  }
-
-  /** Rounding of a product: none for two known factors whose bits fit, only by underflow for a power of two. */
-  private productError(k: number, entry: { readonly format: 'f64' | 'f32' | 'exact' }, a: number, b: number): number {
-    const { format } = entry;
-    if (format === 'exact') return 0;
-    const [pointA, pointB] = [this.point(a), this.point(b)];
-    if (pointA === 0 || pointB === 0) return 0;
-    if (pointA !== undefined && pointB !== undefined) {
-      const unit = this.grid(a, format) * this.grid(b, format);
-      if (this.magnitude(k) <= exactUpTo(unit, format)) return 0;
-    }
-    return isPower(pointA) || isPower(pointB) ? LEAST[format] : halfUnit(this.magnitude(k), format);
-  }
-
-  /** The value of an entry that is one number without error. */
-  private point(k: number): number | undefined {
-    return this.value.lo[k]! === this.value.hi[k]! ? this.value.lo[k]! : undefined;
-  }
-
   private turn(k: number, entry: Extract<Entry, { kind: 'turn' }>, lo: Float64Array, hi: Float64Array): void {
     const angle = entry.angle;
     this.error[k] = this.error[angle]!;
@@ -246,7 +124,12 @@ export class Forward {
     this.components(k);
   }
 
-  private product(k: number, entry: Extract<Entry, { kind: 'product' }>, lo: Float64Array, hi: Float64Array): void {
+  private product(
+    k: number,
+    entry: Extract<Entry, { kind: 'product' }>,
+    lo: Float64Array,
+    hi: Float64Array,
+  ): void {
     const [a, b] = entry.args;
     this.error[k] = (this.error[a]! + this.error[b]!) * SLACK;
     interval.add(this.angle, k, a, b);
@@ -266,7 +149,13 @@ export class Forward {
       ) as [number, number];
       this.setLocal(k, cos, sin, carried);
     } else if (format === 'exact') this.setLocal(k, 0, 0, carried);
-    else this.setLocal(k, this.pairError(k, a, b, format, true), this.pairError(k, a, b, format, false), carried);
+    else
+      this.setLocal(
+        k,
+        this.pairError(k, a, b, format, true),
+        this.pairError(k, a, b, format, false),
+        carried,
+      );
     this.components(k);
   }
 
@@ -324,7 +213,9 @@ export class Forward {
     this.angleOfWork(k);
     const most = w.hi[3]!;
     const slope = 1 - most;
-    const off = (this.deviation[turn]! + this.error[e]! + this.error[root]!) * (most < 1 ? 2 / (slope * slope) : Infinity);
+    const off =
+      (this.deviation[turn]! + this.error[e]! + this.error[root]!) *
+      (most < 1 ? 2 / (slope * slope) : Infinity);
     this.error[k] = (this.error[turn]! * (most < 1 ? 2 / slope : Infinity) + off) * SLACK;
     this.setLocal(k, 0, 0, off);
     this.components(k);
@@ -411,7 +302,8 @@ export class Forward {
     for (const index of target === k ? [k] : [target, k]) {
       this.setAngle(index, lo, hi);
       const own = this.tape.entries[index]!;
-      if (own.kind === 'turn') this.setLocal(index, own.errors?.cos(lo, hi) ?? 0, own.errors?.sin(lo, hi) ?? 0, 0);
+      if (own.kind === 'turn')
+        this.setLocal(index, own.errors?.cos(lo, hi) ?? 0, own.errors?.sin(lo, hi) ?? 0, 0);
       if (own.kind === 'rounded-turn') this.roundedTurn(index, own.turn);
       else this.components(index);
     }
@@ -444,8 +336,4 @@ export class Forward {
     this.work.lo[register] = from.lo[index]!;
     this.work.hi[register] = from.hi[index]!;
   }
-}
-
-function isPower(x: number | undefined): boolean {
-  return x !== undefined && leadingPower(x) === Math.abs(x);
 }

@@ -37,7 +37,11 @@ export class LineTape {
     };
     this.outputs = to.map(visit);
     for (const line of from) visit(line);
-    this.forward = new Forward({ entries, outputs: this.outputs, node: null, orbit: null }, from.map((_, k) => String(k)), []);
+    this.forward = new Forward(
+      { entries, outputs: this.outputs, node: null, orbit: null },
+      from.map((_, k) => String(k)),
+      [],
+    );
     this.backward = new Backward(this.forward);
     this.lo = new Float64Array(from.length);
     this.hi = new Float64Array(from.length);
@@ -64,7 +68,8 @@ export class LineTape {
     const { local } = this.forward;
     return this.outputs.map((_, i) => {
       let sum = 0;
-      for (let k = 0; k < local.length; k++) if (local[k]! > 0) sum += local[k]! * (Math.abs(mid[k * count + i]!) + rad[k * count + i]!);
+      for (let k = 0; k < local.length; k++)
+        if (local[k]! > 0) sum += local[k]! * (Math.abs(mid[k * count + i]!) + rad[k * count + i]!);
       return sum * (1 + 2 ** -40);
     });
   }

@@ -23,7 +23,8 @@ function makeNet(divisions: number): Net {
   for (let k = 0; k < divisions; k++) faces = faces.flatMap(divide);
   const directions: Vector[] = [];
   for (const vertex of faces.flat()) {
-    if (!directions.some((other) => Math.abs(Math.abs(dot(vertex, other)) - 1) < 1e-9)) directions.push(vertex);
+    if (!directions.some((other) => Math.abs(Math.abs(dot(vertex, other)) - 1) < 1e-9))
+      directions.push(vertex);
   }
   const nearest = Math.min(...faces.map(faceDistance));
   return { directions, factor: (1 / nearest) * (1 + 1e-12) };

@@ -38,7 +38,10 @@ export function largestPointwise(proof: Proof, domain: Domain): { bound: number;
       const share = 0.3 * 10 ** ((-3 * step) / STEPS);
       for (let k = 0; k < 3; k++) {
         const name = names[Math.floor(random() * names.length)]!;
-        point[name] = clamp(name, point[name]! + (domain[name]!.max - domain[name]!.min) * share * (2 * random() - 1));
+        point[name] = clamp(
+          name,
+          point[name]! + (domain[name]!.max - domain[name]!.min) * share * (2 * random() - 1),
+        );
       }
       const bound = proof.boundAt(point);
       if (bound > best.bound) best = { point, bound };

@@ -64,12 +64,19 @@ export function asNumbers(polynomial: Polynomial): readonly number[] | undefined
   return numbers.every((number, k) => number === dyadic.toDoubleUp(polynomial[k]!)) ? numbers : undefined;
 }
 
-function combine(a: Polynomial, b: Polynomial, operation: (x: dyadic.Dyadic, y: dyadic.Dyadic) => dyadic.Dyadic): Polynomial {
-  return Array.from({ length: Math.max(a.length, b.length) }, (_, k) => operation(a[k] ?? ZERO, b[k] ?? ZERO));
+function combine(
+  a: Polynomial,
+  b: Polynomial,
+  operation: (x: dyadic.Dyadic, y: dyadic.Dyadic) => dyadic.Dyadic,
+): Polynomial {
+  return Array.from({ length: Math.max(a.length, b.length) }, (_, k) =>
+    operation(a[k] ?? ZERO, b[k] ?? ZERO),
+  );
 }
 
 function multiply(a: Polynomial, b: Polynomial): Polynomial {
   const product: dyadic.Dyadic[] = Array.from({ length: a.length + b.length - 1 }, () => ZERO);
-  for (const [i, x] of a.entries()) for (const [j, y] of b.entries()) product[i + j] = dyadic.add(product[i + j]!, dyadic.mul(x, y));
+  for (const [i, x] of a.entries())
+    for (const [j, y] of b.entries()) product[i + j] = dyadic.add(product[i + j]!, dyadic.mul(x, y));
   return product;
 }

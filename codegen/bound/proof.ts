@@ -44,7 +44,12 @@ export class Proof {
     whole.run(lo, hi);
     const cuts = cutTurns(this.tape, whole);
     this.inputs = names;
-    this.variables = [...names, ...cuts.map((entry) => `angle of ${lowered.kernel.lines[this.tape.entries[entry]!.line]?.name ?? entry}`)];
+    this.variables = [
+      ...names,
+      ...cuts.map(
+        (entry) => `angle of ${lowered.kernel.lines[this.tape.entries[entry]!.line]?.name ?? entry}`,
+      ),
+    ];
     const replaced = new Set(cuts.flatMap((cut) => replacedInput(this.tape, cut)));
     this.replaced = this.variables.map((name) => replaced.has(name));
     this.forward = new Forward(this.tape, names, cuts);
@@ -118,7 +123,8 @@ function cutTurns(tape: Tape, forward: Forward): readonly number[] {
   };
   for (const k of [...read].sort((a, b) => a - b)) {
     const entry = tape.entries[k]!;
-    const several = entry.kind === 'turn' ? wide(k) === 1 && tape.entries[entry.angle]!.kind !== 'input' : wide(k) > 1;
+    const several =
+      entry.kind === 'turn' ? wide(k) === 1 && tape.entries[entry.angle]!.kind !== 'input' : wide(k) > 1;
     if (several) cuts.push(k);
   }
   return cuts;
@@ -146,7 +152,9 @@ function replacedInput(tape: Tape, k: number): readonly string[] {
 
 function rootBox(lowered: Lowered, names: readonly string[], cuts: number): Box {
   const { domain, choices } = lowered.kernel;
-  const ranges = names.map((name) => widened(domain, name, choices[name === 't' ? 'tick' : 'setup'] === 'f32'));
+  const ranges = names.map((name) =>
+    widened(domain, name, choices[name === 't' ? 'tick' : 'setup'] === 'f32'),
+  );
   return {
     lo: Float64Array.from([...ranges.map(([lo]) => lo), ...Array(cuts).fill(-Math.PI - 1e-9)]),
     hi: Float64Array.from([...ranges.map(([, hi]) => hi), ...Array(cuts).fill(Math.PI + 1e-9)]),

@@ -30,32 +30,41 @@ const KEPT = 64;
  * @param effort how many boxes
  * @param progress told the share done
  */
-export function subdivide(proof: Proof, effort: ProofEffort, progress: (share: number) => void = () => {}): Certified {
+export function subdivide(
+  proof: Proof,
+  effort: ProofEffort,
+  progress: (share: number) => void = () => {},
+): Certified {
   const root = proof.root();
   const weights = widthCosts(proof, root);
   const heap = new Heap();
-  const add = (limit: number, box: Box) => heap.push({ bound: Math.min(limit, proof.bound(box)), axes: proof.axes(), box });
-  add(Infinity, root);
+  const rank = (limit: number, box: Box): Ranked => ({
+    bound: Math.min(limit, proof.bound(box)),
+    axes: proof.axes(),
+    box,
+  });
+  heap.push(rank(Infinity, root));
   let boxes = 1;
   while (boxes < effort.boxes) {
-    const top = heap.top();
-    if (top === undefined) break;
+    const top = heap.top()!;
     const variable = costliest(top.box, weights);
     if (variable < 0) break;
     heap.pop();
-    for (const half of halves(top.box, variable)) add(top.bound, half);
+    for (const half of halves(top.box, variable)) heap.push(rank(top.bound, half));
     boxes += 2;
     if (boxes % 512 < 2) progress(boxes / effort.boxes);
   }
   return { bound: heap.top()!.bound, boxes, worst: heap.largest(KEPT), axes: heap.axes() };
 }
 
+/** The variable whose width in a box costs most; -1 when none can be divided. */
 function costliest(box: Box, costs: Float64Array): number {
   let best = -1;
   let most = 0;
   for (let k = 0; k < costs.length; k++) {
     const cost = costs[k]! * (box.hi[k]! - box.lo[k]!);
-    if (cost > most && middle(box.lo[k]!, box.hi[k]!) > box.lo[k]! && middle(box.lo[k]!, box.hi[k]!) < box.hi[k]!) {
+    const cut = middle(box.lo[k]!, box.hi[k]!);
+    if (cost > most && cut > box.lo[k]! && cut < box.hi[k]!) {
       most = cost;
       best = k;
     }
@@ -121,7 +130,10 @@ class Heap {
 
   /** The boxes with the largest bounds. */
   largest(count: number): readonly Box[] {
-    return [...this.items].sort((a, b) => b.bound - a.bound).slice(0, count).map(({ box }) => box);
+    return [...this.items]
+      .sort((a, b) => b.bound - a.bound)
+      .slice(0, count)
+      .map(({ box }) => box);
   }
 
   /** The largest bound along each axis over all boxes. */

@@ -126,7 +126,8 @@ function reducedCells(kernel: Kernel, lines: SineLines, floor: number): Analyse 
       const rounding = tape.errors([lo, q], [hi, q]);
       const [from, to] = tape.rangeOf(remainder);
       const gap = reductionGap(slope, q);
-      const truncation = truncations.get(q) ?? truncationOf(kernel, lines, remainder, new Map([[floor, q]]), q, REDUCED);
+      const truncation =
+        truncations.get(q) ?? truncationOf(kernel, lines, remainder, new Map([[floor, q]]), q, REDUCED);
       truncations.set(q, truncation);
       const [cos, sin] = truncation(from - gap, to + gap);
       const of = (line: number) => rounding[results.indexOf(line)] ?? 0;
@@ -164,7 +165,10 @@ function truncationOf(
     const outer = Math.max(-lo, hi);
     const inner = lo > 0 ? lo : hi < 0 ? -hi : 0;
     if (!(outer <= radius)) return [Infinity, Infinity];
-    const [first, last] = [Math.max(0, Math.floor(inner / part - 1e-9)), Math.min(PARTS - 1, Math.floor(outer / part + 1e-9))];
+    const [first, last] = [
+      Math.max(0, Math.floor(inner / part - 1e-9)),
+      Math.min(PARTS - 1, Math.floor(outer / part + 1e-9)),
+    ];
     let most: [number, number] = [0, 0];
     for (let k = first; k <= last; k++) most = [Math.max(most[0], cos[k]!), Math.max(most[1], sin[k]!)];
     return most;
@@ -182,7 +186,13 @@ function truncationParts(odd: boolean, coefficients: readonly number[], radius: 
 }
 
 /** Coefficients of a polynomial that is odd (parity 1) or even (parity 0), in the form that the truncation takes. */
-function parityCoefficients(kernel: Kernel, line: number, variable: number, known: ReadonlyMap<number, number>, parity: 0 | 1): readonly number[] {
+function parityCoefficients(
+  kernel: Kernel,
+  line: number,
+  variable: number,
+  known: ReadonlyMap<number, number>,
+  parity: 0 | 1,
+): readonly number[] {
   const polynomial = polynomialOf(kernel, line, variable, known);
   const numbers = polynomial && asNumbers(polynomial);
   if (numbers === undefined || numbers.some((c, k) => k % 2 !== parity && c !== 0)) {
@@ -193,13 +203,17 @@ function parityCoefficients(kernel: Kernel, line: number, variable: number, know
 
 /** The floor that only the angle reaches, or -1. */
 function firstFloor(kernel: Kernel, results: readonly number[], angle: number): number {
-  const floors = [...below(kernel, results, [angle])].filter((line) => kernel.lines[line]!.operation === 'floor');
+  const floors = [...below(kernel, results, [angle])].filter(
+    (line) => kernel.lines[line]!.operation === 'floor',
+  );
   return Math.min(...floors, Infinity) === Infinity ? -1 : Math.min(...floors);
 }
 
 /** The last line that is the angle minus a multiple of q: what the polynomials take. */
 function remainderLine(kernel: Kernel, results: readonly number[], angle: number, floor: number): number {
-  const candidates = [...below(kernel, results, [angle, floor])].filter((line) => linear(kernel, line, angle, floor) !== undefined);
+  const candidates = [...below(kernel, results, [angle, floor])].filter(
+    (line) => linear(kernel, line, angle, floor) !== undefined,
+  );
   const last = Math.max(...candidates, -1);
   if (last < 0) throw unproven(kernel, results[0]!, 'has a floor but no remainder of the angle');
   return last;

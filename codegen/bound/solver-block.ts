@@ -87,7 +87,11 @@ class Solver {
     this.room = TURN_ROOM[lowered.kernel.choices.tick];
     this.turn = { cos: cosM, sin: sinM, angle: graph.input('mean anomaly', 'tick') };
     const D = list[0]!;
-    const sine = graph.make('add', graph.make('mul', sinM, graph.make('cos', D)), graph.make('mul', cosM, graph.make('sin', D)));
+    const sine = graph.make(
+      'add',
+      graph.make('mul', sinM, graph.make('cos', D)),
+      graph.make('mul', cosM, graph.make('sin', D)),
+    );
     this.residual = this.analysis(graph.make('sub', D, graph.make('mul', e, sine)), undefined, false);
     this.start = this.analysis(D, undefined, true);
     this.steps = list.slice(1).map((node, k) => this.analysis(node, list[k]!, true));
@@ -102,7 +106,9 @@ class Solver {
     const off = (e.hi * this.room) / (1 - e.hi * (1 + this.room));
     const exact = { lo: w.lo[2]! - off * SLACK, hi: w.hi[2]! + off * SLACK };
     const residual = this.residual.meanValue(M, e);
-    let distance = residual / this.derivatives(M, e, exact, residual / (1 - e.hi)).slope + this.start.rounding(M, e, exact);
+    let distance =
+      residual / this.derivatives(M, e, exact, residual / (1 - e.hi)).slope +
+      this.start.rounding(M, e, exact);
     for (const step of this.steps) {
       const { slope, curvature } = this.derivatives(M, e, exact, distance);
       const around = { lo: exact.lo - distance, hi: exact.hi + distance };
@@ -148,7 +154,9 @@ class Analysis {
   constructor(tape: Tape) {
     this.forward = new Forward(tape, NAMES, []);
     this.backward = new Backward(this.forward);
-    this.inputs = new Map(tape.entries.flatMap((entry, k) => (entry.kind === 'input' ? [[entry.name, k] as const] : [])));
+    this.inputs = new Map(
+      tape.entries.flatMap((entry, k) => (entry.kind === 'input' ? [[entry.name, k] as const] : [])),
+    );
   }
 
   /** Sum of the local errors of the lines, through their adjoints; the turn of the mean anomaly is taken as it is. */

@@ -47,7 +47,12 @@ export type Entry = Common &
     | { readonly kind: 'input'; readonly name: string }
     | { readonly kind: 'constant'; readonly value: number; readonly error: number }
     | { readonly kind: RealKind; readonly args: readonly number[]; readonly format: Format | 'exact' }
-    | { readonly kind: 'turn'; readonly angle: number; readonly errors: SineErrors | null; readonly sinLine: number }
+    | {
+        readonly kind: 'turn';
+        readonly angle: number;
+        readonly errors: SineErrors | null;
+        readonly sinLine: number;
+      }
     | {
         readonly kind: 'product';
         readonly args: readonly [number, number];
@@ -68,7 +73,13 @@ export type Entry = Common &
     | { readonly kind: 'leaf'; readonly of: number; readonly component: 'value' | 'sine' }
     | { readonly kind: 'rounded-turn'; readonly turn: number; readonly sinLine: number }
     | { readonly kind: 'cosine' | 'sine'; readonly turn: number }
-    | { readonly kind: 'offset'; readonly turn: number; readonly e: number; readonly format: Format; readonly errors: SolverErrors | null }
+    | {
+        readonly kind: 'offset';
+        readonly turn: number;
+        readonly e: number;
+        readonly format: Format;
+        readonly errors: SolverErrors | null;
+      }
   );
 
 /**

@@ -36,11 +36,7 @@ export interface Pair {
  * @param nodes all nodes of the formula, arguments before users
  * @param pairs pairs that are known to be cosine and sine of one angle
  */
-export function findTurns(
-  graph: Graph,
-  nodes: readonly Node[],
-  pairs: readonly Pair[],
-): readonly Turn[] {
+export function findTurns(graph: Graph, nodes: readonly Node[], pairs: readonly Pair[]): readonly Turn[] {
   const present = new Set(nodes);
   const angles = new Set(
     nodes.filter((node) => node.operation === 'sin' || node.operation === 'cos').map((node) => node.args[0]!),
@@ -59,7 +55,11 @@ export function findTurns(
     addProducts(graph, present, turns, tried);
     const next = left.find((pair) => !turns.some((turn) => turn.cos === pair.cos || turn.cos === pair.sin));
     if (next === undefined) return turns;
-    turns.push(next.parts === undefined ? partOf(turns, next) : { ...next, factors: [partOf(turns, next.parts[0]), partOf(turns, next.parts[1])] });
+    turns.push(
+      next.parts === undefined
+        ? partOf(turns, next)
+        : { ...next, factors: [partOf(turns, next.parts[0]), partOf(turns, next.parts[1])] },
+    );
   }
 }
 
@@ -68,7 +68,9 @@ function partOf(turns: readonly Turn[], part: Pair): Turn {
   const known = turns.find((turn) => turn.cos === part.cos && turn.sin === part.sin);
   if (known !== undefined) return known;
   const { cos, sin, anomaly } = part;
-  return anomaly === undefined ? { cos, sin } : { cos, sin, anomaly: { ...anomaly, E: partOf(turns, anomaly.E) } };
+  return anomaly === undefined
+    ? { cos, sin }
+    : { cos, sin, anomaly: { ...anomaly, E: partOf(turns, anomaly.E) } };
 }
 
 /** Adds products of turns until there are no new ones. */
@@ -114,7 +116,8 @@ export function findRotation(graph: Graph, turns: readonly Turn[], x: Node, y: N
     const X = cofactor(first, turn.cos);
     const Y = cofactor(second, turn.sin);
     if (X === undefined || Y === undefined) continue;
-    if (graph.make('add', graph.make('mul', X, turn.sin), graph.make('mul', Y, turn.cos)) === y) return { turn, X, Y };
+    if (graph.make('add', graph.make('mul', X, turn.sin), graph.make('mul', Y, turn.cos)) === y)
+      return { turn, X, Y };
   }
   return undefined;
 }

@@ -51,7 +51,10 @@ function grow(proof: Proof, root: Box, shares: Float64Array): Float64Array {
     for (let k = 0; k < count; k++) if (widths[k]! < 1 && (best < 0 || after[k]! < after[best]!)) best = k;
     if (best < 0) return widths;
     const now = wider(best);
-    const second = after.reduce((least, value, k) => (k !== best && widths[k]! < 1 ? Math.min(least, value) : least), Infinity);
+    const second = after.reduce(
+      (least, value, k) => (k !== best && widths[k]! < 1 ? Math.min(least, value) : least),
+      Infinity,
+    );
     after[best] = now;
     if (now > second) continue; // the bound has grown since this one was looked at: another is cheaper
     if (!(now <= limit)) return widths;

@@ -10,13 +10,15 @@ import { printFormula } from '../formula/text.ts';
 import { Judge } from '../observe/judge.ts';
 import { importKernel } from '../observe/module.ts';
 import type { Candidate } from '../observe/observe.ts';
+import { compareKernel } from '../parse/compare.ts';
+import { parseKernel } from '../parse/parse.ts';
 import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
 import { errorSentence, FILES } from './files.ts';
 import { outputsDigest } from './outputs-digest.ts';
 
 /**
- * Checks the files of a variant against the model, from scratch: the kernel is lowered again and compared with the
- * emitted text, its operations and sizes counted again, its outputs computed again, and the worst inputs replayed.
+ * Checks the files of a variant against the model, from scratch: the kernel is lowered again and compared with what the
+ * emitted text is read back to, its operations and sizes counted again, its outputs computed again, and the worst inputs replayed.
  *
  * @param folder the variant's folder
  * @returns what differs; empty when all is as the certificate says
@@ -37,27 +39,41 @@ export async function recheck(folder: string): Promise<readonly Finding[]> {
   const sentences = Object.entries(certificate.error).map(([key, entry]) => errorSentence(key, entry));
   const expected = describeVariant(task, fresh.kernel, sentences);
   return [
-    ...compareCode(folder, code, expected.code),
+    ...compareCode(folder, code, expected),
     ...(await compareCertificate(folder, certificate, task, expected, code)),
     ...(await replay(folder, certificate, task, worst, code)),
   ];
 }
 
-/** Names the first line in which the emitted text differs from what the model gives. */
-function compareCode(folder: string, code: string, expected: string): readonly Finding[] {
-  if (code === expected) return [];
-  const [have, want] = [code.split('\n'), expected.split('\n')];
+/**
+ * Reads the emitted text back into lines and compares them with the kernel that the model gives; where they agree, the
+ * rest of the text (names, comments) must too.
+ */
+function compareCode(folder: string, code: string, expected: Variant): readonly Finding[] {
+  const file = join(folder, FILES.code);
+  const differences = compareLines(file, code, expected);
+  if (differences.length > 0 || code === expected.code) return differences;
+  const [have, want] = [code.split('\n'), expected.code.split('\n')];
   const index = want.findIndex((line, k) => line !== have[k]);
   const line = index < 0 ? want.length : index;
   return [
     {
       code: 'recheck.code',
-      place: { file: join(folder, FILES.code), line: line + 1 },
+      place: { file, line: line + 1 },
       what: `the line reads "${(have[line] ?? '').trim()}", the model gives "${(want[line] ?? '').trim()}"`,
-      why: 'The certificate speaks of the code that the model gives.',
+      why: 'The file computes what the certificate says, but its text is not the one that was generated.',
       remedy: 'Generate the folder again.',
     },
   ];
+}
+
+function compareLines(file: string, code: string, expected: Variant): readonly Finding[] {
+  try {
+    return compareKernel(parseKernel(file, code), expected.kernel, file);
+  } catch (error) {
+    if (error instanceof InputError) return error.findings;
+    throw error;
+  }
 }
 
 async function compareCertificate(

@@ -186,7 +186,10 @@ export class AngleRules {
     if (orbit === undefined) return turn;
     const E = this.turn(orbit.E);
     const scaled = graph.make('mul', E.sin, inverse);
-    return { ...turn, anomaly: { E, e: this.rewrite(orbit.e), root: this.rewrite(orbit.root), sine: scaled } };
+    return {
+      ...turn,
+      anomaly: { E, e: this.rewrite(orbit.e), root: this.rewrite(orbit.root), sine: scaled },
+    };
   }
 }
 

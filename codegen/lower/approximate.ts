@@ -41,7 +41,12 @@ export function approximate(graph: Graph, formula: Formula, ranges: Ranges, choi
     const kept = pass.done.get(node);
     if (kept !== undefined && kept.args.length > 0 && !labels.has(kept)) labels.set(kept, label);
   }
-  return { formula: { ...formula, outputs, labels }, replacements: pass.replacements, plain: pass.done, iterates: pass.iterates };
+  return {
+    formula: { ...formula, outputs, labels },
+    replacements: pass.replacements,
+    plain: pass.done,
+    iterates: pass.iterates,
+  };
 }
 
 class Pass {

@@ -56,7 +56,10 @@ export function lower(formula: Formula, domain: Domain, choices: Choices): Lower
   };
 }
 
-function compose(first: ReadonlyMap<Node, Node>, second: ReadonlyMap<Node, number>): ReadonlyMap<Node, number> {
+function compose(
+  first: ReadonlyMap<Node, Node>,
+  second: ReadonlyMap<Node, number>,
+): ReadonlyMap<Node, number> {
   const result = new Map<Node, number>();
   for (const [node, between] of first) {
     const line = second.get(between);

@@ -21,12 +21,7 @@ export interface Scheduled {
  * @param choices arithmetic of the stages
  * @param domain checked ranges of the elements and of t
  */
-export function schedule(
-  formula: Formula,
-  ranges: Ranges,
-  choices: Choices,
-  domain: Domain,
-): Scheduled {
+export function schedule(formula: Formula, ranges: Ranges, choices: Choices, domain: Domain): Scheduled {
   const scheduler = new Scheduler(choices);
   const outputs = formula.outputs.map(({ group, name, unit, node }) => ({
     group,

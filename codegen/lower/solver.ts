@@ -1,6 +1,6 @@
+import { Evaluator } from '../formula/evaluate.ts';
 import type { Graph } from '../formula/graph.ts';
 import type { Node } from '../formula/node.ts';
-import { Evaluator } from '../formula/evaluate.ts';
 import type { Bounds } from '../formula/ranges.ts';
 import type { Choices } from '../kernel/choices.ts';
 import { applyFunction } from '../read/function.ts';
@@ -43,7 +43,8 @@ export function iterateSizes(offset: Node, list: readonly Node[], e: Bounds): re
     const M = Math.PI * (i / GRID.M) ** 2;
     for (let j = 0; j <= GRID.e; j++) {
       evaluator.runFrom([Math.sin(M), Math.cos(M), e.lo + ((e.hi - e.lo) * j) / GRID.e]);
-      for (const [k, node] of list.entries()) sizes[k] = Math.max(sizes[k]!, Math.abs(evaluator.value(node).hi));
+      for (const [k, node] of list.entries())
+        sizes[k] = Math.max(sizes[k]!, Math.abs(evaluator.value(node).hi));
     }
   }
   return sizes.map((size) => size * 1.02 + 1e-9);

@@ -53,7 +53,7 @@ export class Lines {
   /** Makes sure that nothing is left. */
   end(): void {
     const rest = this.lines[this.next];
-    if (rest === null) this.refuse('parse.form', rest[0]!, `${quote(rest[0]!)} stands behind the end`);
+    if (rest !== undefined) this.refuse('parse.form', rest[0]!, `${quote(rest[0]!)} stands behind the end`);
   }
 
   refuse(code: RefusalCode, mark: Mark, what: string): never {

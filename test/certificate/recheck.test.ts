@@ -34,8 +34,22 @@ describe('recheck names what was changed', () => {
       readFileSync(join(source, 'kernel.js'), 'utf8')
         .split('\n')
         .findIndex((text) => text.includes('0.041666666666666664')) + 1;
-    expect(findings[0]).toMatchObject({ code: 'recheck.code', place: { line } });
+    expect(findings[0]).toMatchObject({ code: 'parse.other-constant', place: { line } });
     expect(findings.map((finding) => finding.what).join()).toContain('digest.kernel');
+  });
+
+  test('a changed comment, though it computes the same', async () => {
+    edit('kernel.js', (text) =>
+      text.replace('Not certified for safety of life', 'Certified for safety of life'),
+    );
+    expect((await recheck(folder))[0]).toMatchObject({ code: 'recheck.code' });
+  });
+
+  test('a line that the emitted form does not know', async () => {
+    edit('kernel.js', (text) => text.replace('  return 0;', '  Math.random();\n  return 0;'));
+    await expect(recheck(folder)).resolves.toContainEqual(
+      expect.objectContaining({ code: expect.stringMatching(/^parse\./) }),
+    );
   });
 
   test('a smaller observed error', async () => {

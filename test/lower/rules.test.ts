@@ -109,7 +109,10 @@ describe('approximating rules keep to their stated error', () => {
     for (const choices of [F64, { ...F64, tick: 'f32' as const }]) {
       const graph = new Graph();
       const ranges = new Ranges(domain);
-      const { formula: exact } = hoistProducts(graph, new AngleRules(graph, ranges).formula(transplant(formula, graph)));
+      const { formula: exact } = hoistProducts(
+        graph,
+        new AngleRules(graph, ranges).formula(transplant(formula, graph)),
+      );
       const { replacements } = approximate(graph, exact, ranges, choices);
       const pairs = [...replacements].filter(
         ([node]) =>

@@ -113,6 +113,15 @@ test.each([
   expect(findingsOf(text, kernel)).toEqual([]);
 });
 
+test('zero with another sign is another constant', () => {
+  const { kernel } = float64;
+  const lines = kernel.lines.map((line) => (line.value === 0.25 ? { ...line, value: 0 } : line));
+  const found = (number: string) =>
+    findingsOf(float64.text.replace('0.25', number), { ...kernel, lines }).map(({ code }) => code);
+  expect(found('0')).toEqual([]);
+  expect(found('-0')).toEqual(['parse.other-constant']);
+});
+
 test('an element that is missing is a difference', () => {
   const text = float64.text
     .replace(/ {2}const M0 = elements.*\n.*\n/, '')

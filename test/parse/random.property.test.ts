@@ -27,7 +27,7 @@ describe('random kernels', () => {
         expect(compareKernel(parsed, kernel, 'kernel.js')).toEqual([]);
         expect(toKernel(parsed, kernel)).toEqual(kernel);
       }),
-      { numRuns: 200, seed: 5 },
+      { numRuns: 150, seed: 5 },
     );
   });
 
@@ -45,7 +45,7 @@ describe('random kernels', () => {
         expect(findingsOf(emit(other), kernel), what).not.toEqual([]);
         expect(() => toKernel(parseKernel('kernel.js', emit(other)), kernel)).toThrow();
       }),
-      { numRuns: 300, seed: 6 },
+      { numRuns: 200, seed: 6 },
     );
     expect([...seen].sort()).toEqual([
       'constant',

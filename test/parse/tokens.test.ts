@@ -42,7 +42,7 @@ describe.each(SAMPLES)('%s: nothing of a file is passed over', (_, { text, kerne
     expect(passed(spans.map(([start, end]) => `${text.slice(0, end)} ${text.slice(start)}`))).toEqual([]);
   });
 
-  test.each(['0', '-', ';', 't', 'const'])('no token can be %s in place of itself', (other) => {
+  test.each(['0', ';', 't'])('no token can be %s in place of itself', (other) => {
     expect(
       passed(spans.map(([start, end]) => `${text.slice(0, start)} ${other} ${text.slice(end)}`)),
     ).toEqual([]);
