@@ -82,6 +82,19 @@ export class Proof {
     return this.bound(box);
   }
 
+  /** How far a unit of error in a line moves the outputs, by line, over the last box: for lines with one entry alone. */
+  lineAdjoints(): ReadonlyMap<number, number> {
+    const { entries } = this.tape;
+    const { count, mid } = this.backward;
+    const result = new Map<number, number>();
+    for (const [k, entry] of entries.entries()) {
+      if (entry.line < 0 || !('args' in entry) || !('format' in entry) || entry.kind === 'product') continue;
+      if (entries.filter((other) => other.line === entry.line).length > 1) continue;
+      result.set(entry.line, Math.hypot(...mid.subarray(k * count, (k + 1) * count)));
+    }
+    return result;
+  }
+
   /** Collects the terms of the error vector over a box. */
   evaluate(box: Box): void {
     this.forward.run(box.lo, box.hi);
