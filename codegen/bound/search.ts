@@ -62,7 +62,7 @@ function costliest(box: Box, costs: Float64Array): number {
   let best = -1;
   let most = 0;
   for (let k = 0; k < costs.length; k++) {
-    const cost = costs[k]! * (box.hi[k]! - box.lo[k]!);
+    const cost = costs[k]! * (box.hi[k]! - box.lo[k]!) * stretch(box.lo[k]!, box.hi[k]!);
     const cut = middle(box.lo[k]!, box.hi[k]!);
     if (cost > most && cut > box.lo[k]! && cut < box.hi[k]!) {
       most = cost;
@@ -70,6 +70,11 @@ function costliest(box: Box, costs: Float64Array): number {
     }
   }
   return best;
+}
+
+/** Errors go by powers of a variable that is always positive: a range of many times its lower end costs more than its width says. */
+function stretch(lo: number, hi: number): number {
+  return lo > 0 ? (hi / lo) ** 4 : 1;
 }
 
 function halves(box: Box, variable: number): readonly [Box, Box] {

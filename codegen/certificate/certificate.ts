@@ -4,20 +4,39 @@ import type { Operations } from '../kernel/operations.ts';
 import type { Effort } from '../observe/observe.ts';
 import type { Point } from '../observe/points.ts';
 
+/** A part of an error along one axis of the orbit. */
+export interface ErrorPart {
+  readonly certified: number | null;
+  readonly observed: number;
+}
+
 /** Error of one output, in the unit of its key. */
 export interface ErrorEntry {
-  /** Proven bound; null until proven. */
-  readonly certified: number | null;
+  /** Proven bound. */
+  readonly certified: number;
   /** Largest error seen. */
   readonly observed: number;
-  /** What the budget allows; null for an output without a limit. */
-  readonly limit: number | null;
+  /** Largest proven bound found at a single point: what subdivision cannot get below. */
+  readonly limit: number;
+  /** What the budget allows. */
+  readonly allowed: number;
+  readonly certified_to_observed: number;
+  readonly certified_to_limit: number;
+  /** Boxes of the proof. */
+  readonly boxes: number;
   /** The input that gives the observed error. */
   readonly at: Point;
-  /** Largest observed parts of a position's error; null for other outputs. */
-  readonly radial: number | null;
-  readonly along: number | null;
-  readonly cross: number | null;
+  /** Parts of a position's error; null for other outputs. */
+  readonly radial: ErrorPart | null;
+  readonly along: ErrorPart | null;
+  readonly cross: ErrorPart | null;
+}
+
+/** A line of the kernel and its share in the certified error of an output, where that is largest. */
+export interface AnatomyEntry {
+  readonly output: string;
+  readonly line: string;
+  readonly share: number;
 }
 
 /** What a reviewer needs to know of one kernel. */
@@ -35,8 +54,8 @@ export interface Certificate {
     readonly velocity_mps?: ErrorEntry;
     readonly clock_s?: ErrorEntry;
   };
-  /** Lines and rules that contribute most to the certified error; empty until proven. */
-  readonly anatomy: readonly never[];
+  /** Lines that contribute most to the certified error; a line that ends a block stands for the whole block. */
+  readonly anatomy: readonly AnatomyEntry[];
   readonly operations: { readonly setup: Operations; readonly tick: Operations };
   readonly state: { readonly words: number; readonly bytes: number };
   readonly code: { readonly bytes: number; readonly minified_bytes: number };
@@ -61,5 +80,7 @@ export const ASSUMPTIONS: readonly string[] = [
   'The engine rounds + - * / and Math.sqrt of float64 numbers as IEEE 754 says, to nearest, ties to even.',
   'Math.floor and Math.abs are exact, and Math.fround rounds to the nearest float32 number, as ECMAScript says.',
   'Subnormal numbers are not flushed to zero.',
+  'The proof: ranges and adjoints are rounded outward from correctly rounded + - * / and Math.sqrt of the engine that runs it; its sines are its own, proven to 2.5 units of 2^-53; truncations of polynomials are bounded in exact rational arithmetic.',
+  'The proof: the exact rules of lowering (sums of angles, true anomaly, regrouped products) hold as published; they are checked in 30-digit arithmetic, not proven by machine.',
   'The formula takes every number written in the model and in the constants as the float64 number that the language makes of it.',
 ];

@@ -1,12 +1,16 @@
+import type { GroupProof } from '../bound/certify.ts';
 import type { Budget } from '../choose/budget.ts';
+import type { Trial } from '../choose/choose.ts';
 import { describeVariant, judgeOf, type Task, type Variant } from '../choose/variant.ts';
 import { codeSize } from '../cost/code-size.ts';
 import { emitDeclarations } from '../emit/declarations.ts';
 import { digest } from '../files/digest.ts';
 import { toolVersion } from '../files/version.ts';
 import { printFormula } from '../formula/text.ts';
-import { type Effort, FULL_EFFORT, type Observed } from '../observe/observe.ts';
+import type { Kernel } from '../kernel/kernel.ts';
+import { FULL_EFFORT, type Observed } from '../observe/observe.ts';
 import {
+  type AnatomyEntry,
   ASSUMPTIONS,
   CAUTION,
   type Certificate,
@@ -23,27 +27,27 @@ export const FILES = {
   worst: 'worst.json',
 } as const;
 
-/** One sentence on the error of an output group, for doc blocks: the figure is rounded up. */
+/** Lines that the anatomy names for each output. */
+const ANATOMY = 10;
+
+/** One sentence on the error of an output group, for doc blocks: figures are rounded up. */
 export function errorSentence(key: string, entry: Pick<ErrorEntry, 'certified' | 'observed'>): string {
-  return `Error ${key}: ${ceilTo3(entry.observed)} observed, not yet certified.`;
+  return `Error ${key}: at most ${ceilTo3(entry.certified)} (certified over the domain), ${ceilTo3(entry.observed)} observed.`;
 }
 
 /** Everything that stands in the folder of a variant, as text by file name. */
 export async function variantFiles(
   task: Task,
   budget: Budget,
-  variant: Variant,
-  observed: readonly Observed[],
+  { variant, observed, proofs }: Trial,
 ): Promise<ReadonlyMap<string, string>> {
-  const entries = observed.map(
-    (entry) => [ERROR_KEY_OF_GROUP[entry.group]!, errorEntry(entry, budget)] as const,
-  );
-  const final = describeVariant(
-    task,
-    variant.kernel,
-    entries.map(([key, entry]) => errorSentence(key, entry)),
-  );
-  const certificate = await certify(task, final, Object.fromEntries(entries));
+  const entries = observed.map((seen) => {
+    const proof = proofs.find((candidate) => candidate.group === seen.group)!;
+    return [ERROR_KEY_OF_GROUP[seen.group]!, errorEntry(seen, proof, budget)] as const;
+  });
+  const sentences = entries.map(([key, entry]) => errorSentence(key, entry));
+  const final = describeVariant(task, variant.lowered, sentences);
+  const certificate = await composeCertificate(task, final, Object.fromEntries(entries), proofs);
   const worst = Object.fromEntries(observed.map((entry) => [entry.group, entry.worst]));
   return new Map([
     [FILES.code, final.code],
@@ -54,11 +58,11 @@ export async function variantFiles(
 }
 
 /** The certificate of a variant whose code is final. */
-async function certify(
+async function composeCertificate(
   task: Task,
   variant: Variant,
   error: Certificate['error'],
-  effort: Effort = FULL_EFFORT,
+  proofs: readonly GroupProof[],
 ): Promise<Certificate> {
   const { kernel, code, cost } = variant;
   const names = task.formula.inputs.map((input) => input.name);
@@ -74,11 +78,11 @@ async function certify(
       ),
     },
     error,
-    anatomy: [],
+    anatomy: proofs.flatMap((proof) => anatomyOf(kernel, proof)),
     operations: cost,
     state: { words: kernel.state.length, bytes: variant.stateBytes },
     code: await codeSize(code),
-    effort,
+    effort: FULL_EFFORT,
     assumptions: ASSUMPTIONS,
     digest: {
       kernel: digest(code),
@@ -89,17 +93,37 @@ async function certify(
   };
 }
 
-function errorEntry(observed: Observed, budget: Budget): ErrorEntry {
-  const [radial, along, cross] = observed.parts ?? [null, null, null];
+/** The lines with the largest shares in the bound of an output. */
+export function anatomyOf(kernel: Kernel, { group, shares }: GroupProof): readonly AnatomyEntry[] {
+  return [...shares]
+    .sort((a, b) => b[1] - a[1] || a[0] - b[0])
+    .slice(0, ANATOMY)
+    .map(([line, share]) => ({
+      output: group,
+      line: kernel.lines[line]!.name,
+      share: Number(share.toPrecision(3)),
+    }));
+}
+
+/** What is certified and observed of an output group. */
+function errorEntry(observed: Observed, proof: GroupProof, budget: Budget): ErrorEntry {
   const key = ERROR_KEY_OF_GROUP[observed.group] as keyof Budget['error'];
+  const part = (axis: 0 | 1 | 2) =>
+    observed.parts === null
+      ? null
+      : { certified: proof.axes?.[axis] ?? null, observed: observed.parts[axis] };
   return {
-    certified: null,
+    certified: proof.bound,
     observed: observed.size,
-    limit: budget.error[key] ?? null,
+    limit: proof.limit,
+    allowed: budget.error[key]!,
+    certified_to_observed: Number((proof.bound / observed.size).toPrecision(4)),
+    certified_to_limit: Number((proof.bound / proof.limit).toPrecision(4)),
+    boxes: proof.boxes,
     at: observed.at,
-    radial,
-    along,
-    cross,
+    radial: part(0),
+    along: part(1),
+    cross: part(2),
   };
 }
 

@@ -1,3 +1,4 @@
+import { certify, type GroupProof, PROOF_EFFORT } from '../bound/certify.ts';
 import { codeSize } from '../cost/code-size.ts';
 import { arithmeticName, type Choices } from '../kernel/choices.ts';
 import { type Effort, FULL_EFFORT, type Observed, observe } from '../observe/observe.ts';
@@ -20,6 +21,8 @@ export interface Trial {
   readonly choices: Choices;
   readonly variant: Variant;
   readonly observed: readonly Observed[];
+  /** Proven bounds by output group; empty for a variant that was ruled out before. */
+  readonly proofs: readonly GroupProof[];
   readonly excesses: readonly Excess[];
 }
 
@@ -28,7 +31,7 @@ export type Progress = (what: string, share: number) => void;
 
 /**
  * Finds the cheapest variant within a budget: variants in the order of their operations a tick (roundings counted),
- * the first whose size and observed error fit.
+ * the first whose size and certified error fit. An error that is seen rules a variant out before the proof is begun.
  *
  * @param task what is generated
  * @param budget limits
@@ -41,13 +44,23 @@ export async function choose(task: Task, budget: Budget, progress: Progress): Pr
     const first = await look(task, variant, FIRST_LOOK, () => {});
     const early = [...(await sizeExcesses(variant, budget)), ...errorExcesses(first, budget)];
     if (early.length > 0) {
-      trials.push({ choices, variant, observed: first, excesses: early });
+      trials.push({ choices, variant, observed: first, proofs: [], excesses: early });
       continue;
     }
-    const observed = await look(task, variant, FULL_EFFORT, (share) => progress(variantName(choices), share));
-    const excesses = errorExcesses(observed, budget);
-    trials.push({ choices, variant, observed, excesses });
-    if (excesses.length === 0) return trials;
+    const proofs = certify(variant.lowered, PROOF_EFFORT, (share) =>
+      progress(`${variantName(choices)}: proving`, share),
+    );
+    const beyond = boundExcesses(proofs, budget);
+    if (beyond.length > 0) {
+      trials.push({ choices, variant, observed: first, proofs, excesses: beyond });
+      continue;
+    }
+    const observed = await look(task, variant, FULL_EFFORT, (share) =>
+      progress(`${variantName(choices)}: observing`, share),
+    );
+    requireObservedBelow(proofs, observed);
+    trials.push({ choices, variant, observed, proofs, excesses: [] });
+    return trials;
   }
   return trials;
 }
@@ -95,6 +108,25 @@ function errorExcesses(observed: readonly Observed[], budget: Budget): readonly 
       observed.find((entry) => entry.group === group)?.size ?? 0,
     ]),
   );
+}
+
+function boundExcesses(proofs: readonly GroupProof[], budget: Budget): readonly Excess[] {
+  return excesses(
+    Object.entries(ERROR_KEYS).map(([key, group]) => [
+      key,
+      budget.error[key as keyof Budget['error']],
+      proofs.find((proof) => proof.group === group)?.bound ?? 0,
+    ]),
+  );
+}
+
+/** An observed error above the certified one is a defect of the proof: nothing may be generated. */
+function requireObservedBelow(proofs: readonly GroupProof[], observed: readonly Observed[]): void {
+  for (const { group, size } of observed) {
+    const bound = proofs.find((proof) => proof.group === group)!.bound;
+    if (size > bound)
+      throw new Error(`the proof is wrong: ${group} has error ${size}, proven to be at most ${bound}`);
+  }
 }
 
 function excesses(

@@ -7,7 +7,7 @@ import type { Formula } from '../formula/node.ts';
 import { printFormula } from '../formula/text.ts';
 import type { Choices } from '../kernel/choices.ts';
 import type { Kernel } from '../kernel/kernel.ts';
-import { lower } from '../lower/lower.ts';
+import { type Lowered, lower } from '../lower/lower.ts';
 import { Judge } from '../observe/judge.ts';
 import { importKernel } from '../observe/module.ts';
 
@@ -22,6 +22,7 @@ export interface Task {
 
 /** One lowering of a task with its code and cost. */
 export interface Variant {
+  readonly lowered: Lowered;
   readonly kernel: Kernel;
   readonly code: string;
   readonly cost: Cost;
@@ -30,12 +31,12 @@ export interface Variant {
 
 /** Lowers, emits and counts one variant. `errors` are the sentences on its error, for the doc block. */
 export function makeVariant(task: Task, choices: Choices, errors: readonly string[] = []): Variant {
-  const { kernel } = lower(task.formula, task.domain, choices);
-  return describeVariant(task, kernel, errors);
+  return describeVariant(task, lower(task.formula, task.domain, choices), errors);
 }
 
-/** Emits and counts a kernel. */
-export function describeVariant(task: Task, kernel: Kernel, errors: readonly string[]): Variant {
+/** Emits and counts a lowered kernel. */
+export function describeVariant(task: Task, lowered: Lowered, errors: readonly string[]): Variant {
+  const { kernel } = lowered;
   const code = emitCode(kernel, {
     title: task.model.title,
     source: task.model.source,
@@ -45,7 +46,13 @@ export function describeVariant(task: Task, kernel: Kernel, errors: readonly str
     errors,
   });
   const wordBytes = stateType(kernel) === 'Float32Array' ? 4 : 8;
-  return { kernel, code, cost: countOperations(kernel), stateBytes: kernel.state.length * wordBytes };
+  return {
+    lowered,
+    kernel,
+    code,
+    cost: countOperations(kernel),
+    stateBytes: kernel.state.length * wordBytes,
+  };
 }
 
 /** The judge of a variant's own code. */

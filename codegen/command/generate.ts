@@ -43,7 +43,7 @@ export const generate: Command = {
       return 1;
     }
     const folder = values.output ?? dirname(file);
-    const files = await variantFiles(task, budget, last.variant, last.observed);
+    const files = await variantFiles(task, budget, last);
     writeTogether(folder, files);
     process.stdout.write(values.json ? files.get(FILES.certificate)! : formatTrials(trials));
     if (!values.json)
@@ -57,13 +57,22 @@ export const generate: Command = {
 /** The trials as a table: what each costs, and which limit it breaks. */
 export function formatTrials(trials: readonly Trial[]): string {
   return formatTable(
-    ['variant', 'operations/tick', 'operations/setup', 'state bytes', 'largest observed error', 'verdict'],
-    trials.map(({ choices, variant, observed, excesses }) => [
+    [
+      'variant',
+      'operations/tick',
+      'operations/setup',
+      'state bytes',
+      'error observed',
+      'error certified',
+      'verdict',
+    ],
+    trials.map(({ choices, variant, observed, proofs, excesses }) => [
       variantName(choices),
       variant.cost.tick.total,
       variant.cost.setup.total,
       variant.stateBytes,
       observed.map((entry) => `${entry.group} ${entry.size.toExponential(2)}`).join(', '),
+      proofs.map((entry) => `${entry.group} ${entry.bound.toExponential(2)}`).join(', '),
       excesses.length === 0 ? 'fits' : excesses.map(formatExcess).join('; '),
     ]),
   );
@@ -86,7 +95,8 @@ function nearest(trials: readonly Trial[]): string {
 
 function describe(certificate: Certificate, folder: string): string {
   const errors = Object.entries(certificate.error).map(
-    ([key, entry]) => `${key} ${entry.observed.toExponential(2)} observed, not yet certified`,
+    ([key, entry]) =>
+      `${key} certified ${entry.certified.toExponential(2)} in ${entry.boxes} boxes, observed ${entry.observed.toExponential(2)}`,
   );
   return `written to ${folder}: ${certificate.code.bytes} bytes of code (${certificate.code.minified_bytes} minified); error ${errors.join(', ')}`;
 }

@@ -1,4 +1,4 @@
-import type { Graph } from '../formula/graph.ts';
+import { type Graph, inOrder } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
 
 /** A formula after the rule, and where its nodes went. */
@@ -9,7 +9,8 @@ export interface Hoisted {
 
 /**
  * Exact rule for products: (a b) c = (a c) b. The factors of a product of the tick that setup knows are
- * multiplied there.
+ * multiplied there. A product that several nodes read stays as it is: taking it apart would compute it several times, and the
+ * formula would lose its shape.
  */
 export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
   const done = new Map<Node, Node>();
@@ -20,13 +21,18 @@ export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
     done.set(node, made);
     return made;
   };
+  const uses = countUses(formula);
+  const factorsOf = (node: Node): readonly Node[] =>
+    node.operation === 'mul' && node.stage === 'tick' && uses.get(node) === 1
+      ? node.args.flatMap(factorsOf)
+      : [node];
   const hoistNew = (node: Node): Node => {
     if (node.args.length === 0) return node;
-    const args = node.args.map(hoist);
-    if (node.operation !== 'mul' || node.stage !== 'tick') return graph.make(node.operation, ...args);
-    const factors = args.flatMap(factorsOf);
+    if (node.operation !== 'mul' || node.stage !== 'tick')
+      return graph.make(node.operation, ...node.args.map(hoist));
+    const factors = node.args.flatMap(factorsOf).map(hoist);
     const early = factors.filter((factor) => factor.stage !== 'tick');
-    if (early.length < 2) return graph.make('mul', ...args);
+    if (early.length < 2) return graph.make('mul', ...node.args.map(hoist));
     const product = (list: readonly Node[]) => list.reduce((a, b) => graph.make('mul', a, b));
     return graph.make('mul', product(early), product(factors.filter((factor) => factor.stage === 'tick')));
   };
@@ -39,7 +45,11 @@ export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
   return { formula: { ...formula, outputs, labels }, moved: done };
 }
 
-/** The factors of a product of the tick; other nodes are their own factor. */
-function factorsOf(node: Node): readonly Node[] {
-  return node.operation === 'mul' && node.stage === 'tick' ? node.args.flatMap(factorsOf) : [node];
+/** How many nodes and outputs of a formula read each node. */
+function countUses(formula: Formula): ReadonlyMap<Node, number> {
+  const roots = formula.outputs.map((output) => output.node);
+  const uses = new Map<Node, number>();
+  for (const node of [...roots, ...inOrder(roots).flatMap((user) => user.args)])
+    uses.set(node, (uses.get(node) ?? 0) + 1);
+  return uses;
 }

@@ -38,7 +38,7 @@ export interface Elements {
 export type Status = 0 | 1 | 2 | 3;
 
 /** Words of the state array. */
-export declare const stateWords: 21;
+export declare const stateWords: 20;
 
 /** Prepares the state of one satellite. */
 export declare function setup(elements: Elements, state: Float32Array): Status;

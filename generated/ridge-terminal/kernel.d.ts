@@ -18,7 +18,7 @@ export interface Elements {
 export type Status = 0 | 1 | 2 | 3;
 
 /** Words of the state array. */
-export declare const stateWords: 12;
+export declare const stateWords: 11;
 
 /** Prepares the state of one satellite. */
 export declare function setup(elements: Elements, state: Float64Array): Status;

@@ -48,7 +48,7 @@ export interface Elements {
 export type Status = 0 | 1 | 2 | 3;
 
 /** Words of the state array. */
-export declare const stateWords: 27;
+export declare const stateWords: 26;
 
 /** Prepares the state of one satellite. */
 export declare function setup(elements: Elements, state: Float64Array): Status;

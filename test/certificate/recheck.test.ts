@@ -59,6 +59,13 @@ describe('recheck names what was changed', () => {
     );
   });
 
+  test('a smaller certified error', async () => {
+    edit('certificate.json', (text) => text.replace(/"certified": [^,]+/, '"certified": 2.1e-7'));
+    const findings = await recheck(folder);
+    expect(findings).toHaveLength(1);
+    expect(findings[0]!.what).toMatch(/position: certified is stated as 2\.1e-7 and found to be 2\.6/);
+  });
+
   test.each([
     ['operations', /"total": \d+/, '"total": 1'],
     ['state', /"words": \d+/, '"words": 2'],
