@@ -59,11 +59,21 @@ describe('recheck names what was changed', () => {
     );
   });
 
-  test('a smaller certified error', async () => {
-    edit('certificate.json', (text) => text.replace(/"certified": [^,]+/, '"certified": 2.1e-7'));
+  test('a smaller certified error, so little smaller that the doc block reads the same', async () => {
+    edit('certificate.json', (text) =>
+      text.replace(/"certified": ([^,]+)/, (_, value) => `"certified": ${Number(value) * 0.9985}`),
+    );
     const findings = await recheck(folder);
     expect(findings).toHaveLength(1);
-    expect(findings[0]!.what).toMatch(/position: certified is stated as 2\.1e-7 and found to be 2\.6/);
+    expect(findings[0]!.what).toMatch(
+      /^position: certified is stated as 2\.65\d*e-7 and found to be 2\.65\d*e-7/,
+    );
+  });
+
+  test('a smaller certified error, in the doc block too', async () => {
+    edit('certificate.json', (text) => text.replace(/"certified": [^,]+/, '"certified": 2.1e-7'));
+    edit('kernel.js', (text) => text.replace('at most 2.66e-7', 'at most 2.10e-7'));
+    expect(await recheck(folder)).not.toEqual([]);
   });
 
   test.each([
