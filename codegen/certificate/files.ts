@@ -131,7 +131,9 @@ function json(value: unknown): string {
   return `${JSON.stringify(value, null, 2)}\n`;
 }
 
+/** Three digits, rounded up. */
 function ceilTo3(x: number): string {
   const short = Number(x.toPrecision(3));
-  return (short >= x ? short : Number((x * 1.005).toPrecision(3))).toPrecision(3);
+  const unit = 10 ** (Math.floor(Math.log10(x)) - 2);
+  return (short >= x ? short : short + unit).toPrecision(3);
 }

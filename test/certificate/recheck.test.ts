@@ -59,7 +59,7 @@ describe('recheck names what was changed', () => {
     );
   });
 
-  test('a smaller certified error, so little smaller that the doc block reads the same', async () => {
+  test('a smaller certified error that reads the same in the doc block', async () => {
     edit('certificate.json', (text) =>
       text.replace(/"certified": ([^,]+)/, (_, value) => `"certified": ${Number(value) * 0.9985}`),
     );
