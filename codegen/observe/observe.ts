@@ -15,7 +15,7 @@ export interface Effort {
 }
 
 /** The effort behind every observed figure of a certificate. */
-export const FULL_EFFORT: Effort = { points: 100_000, starts: 24, steps: 1500, seed: 1 };
+export const FULL_EFFORT: Effort = { points: 100_000, starts: 10, steps: 8000, seed: 1 };
 
 /** The largest error seen in an output group and the input that gives it. */
 export interface Observed {
@@ -34,12 +34,15 @@ export interface Candidate {
   readonly point: Point;
 }
 
+/** The smallest step of a climb, as a power of two of a range: rounding errors change with the last bits of the inputs. */
+const FINEST = 40;
+
 /** Worst points that are kept. */
 const KEPT = 4;
 
 /**
  * Looks for the largest error of a kernel over a domain: points drawn at random, then climbs from the worst of them
- * by normal steps that shrink from a tenth of each range to its millionth part.
+ * by normal steps of all sizes, from half of each range down to the last bits.
  *
  * @param judge the kernel and its formula
  * @param domain ranges of the inputs
@@ -68,7 +71,9 @@ export function observe(
       keep(best.get(group)!, { size, point }, effort.starts);
   }
   return judge.groups.map((group) => {
-    const tops = best.get(group)!.map((start) => climb(judge, points, group, start, effort.steps, tick));
+    const tops = best
+      .get(group)!
+      .map((start) => climb(judge, points, random, group, start, effort.steps, tick));
     const [top] = tops.sort((a, b) => b.size - a.size) as [Candidate, ...Candidate[]];
     return {
       group,
@@ -83,6 +88,7 @@ export function observe(
 function climb(
   judge: Judge,
   points: Points,
+  random: Random,
   group: string,
   start: Candidate,
   steps: number,
@@ -90,7 +96,7 @@ function climb(
 ): Candidate {
   let top = start;
   for (let k = 0; k < steps; k++, tick()) {
-    const point = points.near(top.point, 10 ** (-1 - (5 * k) / steps));
+    const point = points.near(top.point, 2 ** (-1 - FINEST * random.next()));
     const size = judge.errors(point).get(group)!.size;
     if (size > top.size) top = { size, point };
   }
