@@ -36,7 +36,7 @@ export class KernelBlocks implements Blocks {
     const known = this.solvers.get(offset);
     if (known !== undefined) return known;
     const { lo, hi } = new Ranges(this.lowered.kernel.domain).of(offset.args[2]!);
-    const made = solverErrors(this.lowered, offset, { lo, hi: hi * ROUNDED }, this);
+    const made = solverErrors(this.lowered, offset, { lo: lo / ROUNDED, hi: hi * ROUNDED }, this);
     this.solvers.set(offset, made);
     return made;
   }

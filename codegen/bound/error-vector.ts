@@ -66,7 +66,7 @@ export class ErrorVector {
         kind === 'anomaly'
       )
         this.collectTurn(k);
-      else if (this.forward.local[k]! > 0 && this.twins[k] !== -2)
+      else if (this.forward.local[k]! !== 0 && this.twins[k] !== -2)
         this.collectReal(k, this.forward.local[k]!);
     }
     this.ball = this.rotationError();

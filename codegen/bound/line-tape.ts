@@ -69,7 +69,7 @@ export class LineTape {
     return this.outputs.map((_, i) => {
       let sum = 0;
       for (let k = 0; k < local.length; k++)
-        if (local[k]! > 0) sum += local[k]! * (Math.abs(mid[k * count + i]!) + rad[k * count + i]!);
+        if (local[k]! !== 0) sum += local[k]! * (Math.abs(mid[k * count + i]!) + rad[k * count + i]!);
       return sum * (1 + 2 ** -40);
     });
   }

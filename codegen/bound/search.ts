@@ -1,5 +1,5 @@
 import type { Box, Proof } from './proof.ts';
-import { widthCosts } from './widths.ts';
+import { WidthCosts } from './widths.ts';
 
 /** How long a proof goes on: the bound holds whenever it stops, more boxes only tighten it. */
 export interface ProofEffort {
@@ -19,6 +19,9 @@ export interface Certified {
   readonly axes: readonly [number, number, number] | null;
 }
 
+/** Costs of widths are measured at each of the first generations of halving, and from then on once in so many. */
+const LASTING = 8;
+
 /** Boxes that are kept for the observed side. */
 const KEPT = 64;
 
@@ -35,34 +38,34 @@ export function subdivide(
   effort: ProofEffort,
   progress: (share: number) => void = () => {},
 ): Certified {
-  const root = proof.root();
-  const weights = widthCosts(proof, root);
+  const widths = new WidthCosts(proof);
   const heap = new Heap();
-  const rank = (limit: number, box: Box): Ranked => ({
-    bound: Math.min(limit, proof.bound(box)),
-    axes: proof.axes(),
-    box,
-  });
-  heap.push(rank(Infinity, root));
-  let boxes = 1;
-  while (boxes < effort.boxes) {
-    const top = heap.top()!;
-    const variable = costliest(top.box, weights);
+  let halved = 0;
+  const push = (limit: number, box: Box, costs: Float64Array, generation: number): void => {
+    halved++;
+    heap.push({ bound: Math.min(limit, proof.bound(box)), axes: proof.axes(), box, costs, generation });
+  };
+  const root = proof.root();
+  push(Infinity, root, new Float64Array(root.lo.length), 0);
+  while (halved + widths.evaluations < effort.boxes) {
+    const { box, bound, generation, costs: known } = heap.top()!;
+    const costs = generation < LASTING || generation % LASTING === 0 ? widths.of(box) : known;
+    const variable = costliest(box, costs);
     if (variable < 0) break;
     heap.pop();
-    for (const half of halves(top.box, variable)) heap.push(rank(top.bound, half));
-    boxes += 2;
-    if (boxes % 512 < 2) progress(boxes / effort.boxes);
+    for (const half of halves(box, variable)) push(bound, half, costs, generation + 1);
+    progress((halved + widths.evaluations) / effort.boxes);
   }
+  const boxes = halved + widths.evaluations;
   return { bound: heap.top()!.bound, boxes, worst: heap.largest(KEPT), axes: heap.axes() };
 }
 
 /** The variable whose width in a box costs most; -1 when none can be divided. */
 function costliest(box: Box, costs: Float64Array): number {
   let best = -1;
-  let most = 0;
+  let most = -1;
   for (let k = 0; k < costs.length; k++) {
-    const cost = costs[k]! * (box.hi[k]! - box.lo[k]!) * stretch(box.lo[k]!, box.hi[k]!);
+    const cost = costs[k]! * (box.hi[k]! - box.lo[k]!);
     const cut = middle(box.lo[k]!, box.hi[k]!);
     if (cost > most && cut > box.lo[k]! && cut < box.hi[k]!) {
       most = cost;
@@ -70,11 +73,6 @@ function costliest(box: Box, costs: Float64Array): number {
     }
   }
   return best;
-}
-
-/** Errors go by powers of a variable that is always positive: a range of many times its lower end costs more than its width says. */
-function stretch(lo: number, hi: number): number {
-  return lo > 0 ? (hi / lo) ** 4 : 1;
 }
 
 function halves(box: Box, variable: number): readonly [Box, Box] {
@@ -96,6 +94,10 @@ interface Ranked {
   readonly bound: number;
   readonly axes: readonly [number, number, number] | null;
   readonly box: Box;
+  /** What a unit of width of each variable costs about here. */
+  readonly costs: Float64Array;
+  /** How many times the domain has been halved to make the box. */
+  readonly generation: number;
 }
 
 /** Boxes by their bound, the largest on top. */

@@ -5,16 +5,15 @@ import * as interval from '../numbers/interval.ts';
 import { Backward } from './backward.ts';
 import { type Blocks, Builder } from './build.ts';
 import { Forward } from './forward.ts';
+import { type CellError, solverTable } from './solver-table.ts';
 import type { SineErrors, SolverErrors, Span, Tape } from './tape.ts';
 import type { Turn } from './turns.ts';
 
-/** Cells of the mean anomaly and of the eccentricity in the table of errors. */
-const CELLS = { M: 192, e: 8 } as const;
-
-const CELL = (2 * Math.PI) / CELLS.M;
-
 /** Room for rounding in sums of bounds. */
 const SLACK = 1 + 2 ** -36;
+
+/** Room for rounding in products that may be zero. */
+const TINY = 2 ** -60;
 
 /**
  * Distance from the unit circle that the turn of the mean anomaly may have in a kernel; the tape that uses the table
@@ -37,30 +36,7 @@ export const TURN_ROOM: Readonly<Record<'f64' | 'f32', number>> = { f64: 2 ** -4
  */
 export function solverErrors(lowered: Lowered, offset: Node, e: Span, blocks: Blocks): SolverErrors {
   const solver = new Solver(lowered, offset, blocks);
-  const table = new Float64Array(CELLS.M * CELLS.e);
-  const width = (e.hi - e.lo) / CELLS.e;
-  for (let i = 0; i < CELLS.M; i++) {
-    const M = { lo: i * CELL - Math.PI - 1e-9, hi: (i + 1) * CELL - Math.PI + 1e-9 };
-    for (let j = 0; j < CELLS.e; j++) {
-      const cell = { lo: Math.max(0, e.lo + j * width - 1e-12), hi: e.lo + (j + 1) * width + 1e-12 };
-      table[i * CELLS.e + j] = solver.error(M, cell);
-    }
-  }
-  return {
-    offset: (M, range) => {
-      const first = Math.floor((M.lo + Math.PI) / CELL - 1e-9);
-      const last = Math.min(Math.floor((M.hi + Math.PI) / CELL + 1e-9), first + CELLS.M - 1);
-      const from = Math.max(0, Math.floor((range.lo - e.lo) / width - 1e-9));
-      const to = Math.min(CELLS.e - 1, Math.floor((range.hi - e.lo) / width + 1e-9));
-      if (!(range.hi <= e.hi + 1e-12) || !(last >= first)) return Infinity;
-      let most = 0;
-      for (let i = first; i <= last; i++) {
-        const row = (((i % CELLS.M) + CELLS.M) % CELLS.M) * CELLS.e;
-        for (let j = from; j <= to; j++) most = Math.max(most, table[row + j]!);
-      }
-      return most;
-    },
-  };
+  return solverTable(e, (M, cell) => solver.error(M, cell));
 }
 
 /** Names of the inputs of the analyses of one cell. */
@@ -98,36 +74,81 @@ class Solver {
   }
 
   /** Bound on |computed D - exact D| over a cell. */
-  error(M: Span, e: Span): number {
+  error(M: Span, e: Span): CellError {
     const w = this.work;
     interval.set(w, 0, M.lo, M.hi);
     interval.set(w, 1, e.lo, e.hi);
     interval.keplerOffset(w, 2, 0, 1);
     const off = (e.hi * this.room) / (1 - e.hi * (1 + this.room));
     const exact = { lo: w.lo[2]! - off * SLACK, hi: w.hi[2]! + off * SLACK };
-    const residual = this.residual.meanValue(M, e);
-    let distance =
-      residual / this.derivatives(M, e, exact, residual / (1 - e.hi)).slope +
-      this.start.rounding(M, e, exact);
+    const start = this.startingError(M, e, exact);
+    let rounding = this.start.rounding(M, e, exact);
+    let error = { lo: start.lo - rounding, hi: start.hi + rounding };
     for (const step of this.steps) {
-      const { slope, curvature } = this.derivatives(M, e, exact, distance);
-      const around = { lo: exact.lo - distance, hi: exact.hi + distance };
-      distance = ((curvature / (2 * slope)) * distance * distance + step.rounding(M, e, around)) * SLACK;
+      const at = { lo: exact.lo + error.lo, hi: exact.hi + error.hi };
+      rounding = step.rounding(M, e, at);
+      error = this.newton(M, e, exact, error, rounding);
     }
-    return distance * SLACK;
+    const most = Math.max(-error.lo, error.hi) * SLACK;
+    return Number.isNaN(most) ? { error: Infinity, rounding: 0 } : { error: most, rounding };
   }
 
-  /** The least f' = 1 - e cos E and the largest |f''| = e |sin E| within a distance of the exact solution. */
-  private derivatives(M: Span, e: Span, exact: Span, distance: number): { slope: number; curvature: number } {
-    const w = this.work;
+  /** Error of the exact starter: its residual over the least slope on the way to the root, or the ranges' distance. */
+  private startingError(M: Span, e: Span, exact: Span): Span {
+    const residual = this.residual.range(M, e);
+    const size = Math.max(-residual.lo, residual.hi);
+    const far = size / (1 - e.hi * (1 + 2 * this.room));
+    const way = size / this.slope(M, e, { lo: exact.lo - far, hi: exact.hi + far }).lo;
+    const start = this.start.range(M, e);
+    return {
+      lo: Math.max(-way, interval.down(start.lo - exact.hi)) * SLACK,
+      hi: Math.min(way, interval.up(start.hi - exact.lo)) * SLACK,
+    };
+  }
+
+  /**
+   * Error after Newton's step from D with an error in a range: f''(between) / (2 f'(D)) times the square, by Taylor's
+   * theorem, plus what the lines of the step round.
+   */
+  private newton(M: Span, e: Span, exact: Span, error: Span, rounding: number): Span {
+    const slope = this.slope(M, e, { lo: exact.lo + error.lo, hi: exact.hi + error.hi });
+    const between = { lo: exact.lo + Math.min(0, error.lo), hi: exact.hi + Math.max(0, error.hi) };
+    const curvature = this.curvature(M, e, between);
+    const square = Math.max(error.lo * error.lo, error.hi * error.hi) * SLACK;
+    const most = (size: number) => ((Math.max(0, size) * square) / (2 * slope.lo)) * SLACK + rounding;
+    return { lo: -most(-curvature.lo), hi: most(curvature.hi) };
+  }
+
+  /** Range of f' = 1 - e cos(M + D); with a turn off the unit circle. */
+  private slope(M: Span, e: Span, D: Span): Span {
     const steepest = 1 - e.hi * (1 + 2 * this.room);
-    if (!(distance < 8)) return { slope: steepest, curvature: e.hi * (1 + 2 * this.room) };
-    interval.set(w, 3, interval.down(M.lo + exact.lo - distance), interval.up(M.hi + exact.hi + distance));
+    if (!(D.hi - D.lo < 8)) return { lo: steepest, hi: 2 };
+    const w = this.work;
+    this.sum(M, D);
     interval.cos(w, 4, 3);
+    const [least, most] = [w.lo[4]! - 2 * this.room, w.hi[4]! + 2 * this.room];
+    return {
+      lo: Math.max(steepest, 1 - Math.max(e.hi * most, e.lo * most)) / SLACK,
+      hi: (1 - Math.min(e.hi * least, e.lo * least)) * SLACK,
+    };
+  }
+
+  /** Range of f'' = e sin(M + D); with a turn off the unit circle. */
+  private curvature(M: Span, e: Span, D: Span): Span {
+    const steepest = e.hi * (1 + 2 * this.room);
+    if (!(D.hi - D.lo < 8)) return { lo: -steepest, hi: steepest };
+    const w = this.work;
+    this.sum(M, D);
     interval.sin(w, 5, 3);
-    const most = w.hi[4]! + 2 * this.room;
-    const slope = 1 - Math.max(e.hi * most, e.lo * most);
-    return { slope: slope / SLACK, curvature: e.hi * (Math.max(-w.lo[5]!, w.hi[5]!) + 2 * this.room) };
+    const [least, most] = [w.lo[5]! - 2 * this.room, w.hi[5]! + 2 * this.room];
+    return {
+      lo: Math.min(e.hi * least, e.lo * least) - TINY,
+      hi: Math.max(e.hi * most, e.lo * most) + TINY,
+    };
+  }
+
+  private sum(M: Span, D: Span): void {
+    interval.set(this.work, 3, interval.down(M.lo + D.lo), interval.up(M.hi + D.hi));
   }
 
   private analysis(node: Node, previous: Node | undefined, rounded: boolean): Analysis {
@@ -171,20 +192,21 @@ class Analysis {
         if (entry.angle === this.inputs.get('M')) continue;
         const size = Math.abs(mid[k]!) + rad[k]! + Math.abs(midT[k]!) + radT[k]!;
         sum += size * (local[k]! + localSine[k]!) * 1.001;
-      } else if (local[k]! > 0) {
+      } else if (local[k]! !== 0) {
         sum += local[k]! * (Math.abs(mid[k]!) + rad[k]!);
       }
     }
     return sum * SLACK;
   }
 
-  /** Largest magnitude over a cell: the value in its middle and the slopes times the way to its edges. */
-  meanValue(M: Span, e: Span): number {
+  /** Range over a cell: the value in its middle, and the slopes times the way to its edges; or the plain range. */
+  range(M: Span, e: Span): Span {
     const middle = (span: Span) => ({ lo: (span.lo + span.hi) / 2, hi: (span.lo + span.hi) / 2 });
     const D = { lo: 0, hi: 0 };
+    const { value, tape } = this.forward;
+    const output = tape.outputs[0]!;
     this.run(middle(M), middle(e), D);
-    const output = this.forward.tape.outputs[0]!;
-    const value = Math.max(-this.forward.value.lo[output]!, this.forward.value.hi[output]!);
+    const [lo, hi] = [value.lo[output]!, value.hi[output]!];
     this.run(M, e, D);
     this.backward.run();
     const slope = (name: string) => {
@@ -192,7 +214,11 @@ class Analysis {
       return k === undefined ? 0 : Math.abs(this.backward.mid[k]!) + this.backward.rad[k]!;
     };
     const way = (span: Span) => ((span.hi - span.lo) / 2) * SLACK;
-    return (value + slope('M') * way(M) + slope('e') * way(e)) * SLACK;
+    const room = (slope('M') * way(M) + slope('e') * way(e)) * SLACK;
+    return {
+      lo: Math.max(interval.down(lo - room), value.lo[output]!),
+      hi: Math.min(interval.up(hi + room), value.hi[output]!),
+    };
   }
 
   private run(M: Span, e: Span, D: Span): void {

@@ -1,81 +1,67 @@
 import type { Box, Proof } from './proof.ts';
 
-/** Places at which boxes are grown: the worst of `SAMPLES` small boxes. */
-const PLACES = 6;
-const SAMPLES = 60;
+/** Width of the small boxes in which the variables are tried one by one, as a share of the box. */
+const SMALL = 2 ** -8;
 
-/** A box starts with this share of every range and grows until its bound is this much above that of the start. */
-const START = 2 ** -9;
-const GROWTH = 1.2;
+/** Small boxes that are looked at: the one with the largest bound is taken. */
+const PLACES = 6;
+
+/** A rise beyond all bounds still has to be compared with others. */
+const LARGEST_RISE = 1e9;
 
 /**
- * What a unit of width of each variable costs. Small boxes are grown, always in the variable that raises the bound
- * least, until the bound is a fifth higher: the widths that they then have are worth the same, so the cost of a variable is
- * one over its width. A variable that reaches its whole range everywhere costs nothing: it is never split.
- *
- * @param proof bounds over boxes
- * @param root the whole domain
+ * What a unit of width of each variable costs about a box: how far the bound of a small box rises when that one variable
+ * takes its whole range in the box. The small box lies where the bound is large, so that the rise is owed to the width
+ * and not to other values of the variable; variables are tried alone, since where all are wide none does any good alone.
  */
-export function widthCosts(proof: Proof, root: Box): Float64Array {
-  const count = root.lo.length;
-  const random = generator();
-  const places = Array.from({ length: SAMPLES }, () => {
-    const shares = Float64Array.from({ length: count }, random);
-    return { shares, bound: proof.bound(boxAt(root, shares, startWidths(proof))) };
-  });
-  places.sort((a, b) => b.bound - a.bound);
-  const costs = new Float64Array(count);
-  for (const { shares } of places.slice(0, PLACES)) {
-    const widths = grow(proof, root, shares);
-    for (let k = 0; k < count; k++) if (widths[k]! < 1) costs[k]! += 1 / (PLACES * widths[k]!);
-  }
-  return costs.map((cost, k) => {
-    const range = root.hi[k]! - root.lo[k]!;
-    return range > 0 ? cost / range : 0;
-  });
-}
+export class WidthCosts {
+  /** Boxes evaluated so far. */
+  evaluations = 0;
+  private readonly proof: Proof;
+  private readonly random: () => number = generator();
 
-/** The widths of a box grown at a place, as shares of the ranges. */
-function grow(proof: Proof, root: Box, shares: Float64Array): Float64Array {
-  const count = shares.length;
-  const widths = startWidths(proof);
-  const limit = proof.bound(boxAt(root, shares, widths)) * GROWTH;
-  const wider = (k: number) => {
-    const tried = widths.slice();
-    tried[k] = Math.min(1, 2 * tried[k]!);
-    return proof.bound(boxAt(root, shares, tried));
-  };
-  const after = Float64Array.from(widths, (_, k) => wider(k));
-  for (;;) {
-    let best = -1;
-    for (let k = 0; k < count; k++) if (widths[k]! < 1 && (best < 0 || after[k]! < after[best]!)) best = k;
-    if (best < 0) return widths;
-    const now = wider(best);
-    const second = after.reduce(
-      (least, value, k) => (k !== best && widths[k]! < 1 ? Math.min(least, value) : least),
-      Infinity,
+  constructor(proof: Proof) {
+    this.proof = proof;
+  }
+
+  /** Costs about a box, by variable; zero for those that angles of turns replace. */
+  of(box: Box): Float64Array {
+    const { small, bound } = this.place(box);
+    return box.lo.map((lo, k) => {
+      const width = box.hi[k]! - lo;
+      if (this.proof.replaced[k] || !(width > 0)) return 0;
+      const grown = { lo: small.lo.slice(), hi: small.hi.slice() };
+      grown.lo[k] = lo;
+      grown.hi[k] = box.hi[k]!;
+      return Math.min(this.bound(grown) / bound - 1, LARGEST_RISE) / width;
+    });
+  }
+
+  /** The small box with the largest bound among some. */
+  private place(box: Box): { small: Box; bound: number } {
+    const tried = Array.from({ length: PLACES }, () => {
+      const small = this.small(box);
+      return { small, bound: this.bound(small) };
+    });
+    return tried.reduce((most, other) => (other.bound > most.bound ? other : most));
+  }
+
+  private bound(box: Box): number {
+    this.evaluations++;
+    return this.proof.bound(box);
+  }
+
+  /** A small box at random; variables that angles of turns replace keep their range. */
+  private small(box: Box): Box {
+    const { replaced } = this.proof;
+    const lo = box.lo.map((low, k) =>
+      replaced[k] ? low : low + (box.hi[k]! - low) * this.random() * (1 - SMALL),
     );
-    after[best] = now;
-    if (now > second) continue; // the bound has grown since this one was looked at: another is cheaper
-    if (!(now <= limit)) return widths;
-    widths[best] = Math.min(1, 2 * widths[best]!);
-    after[best] = wider(best);
+    const hi = box.hi.map((high, k) =>
+      replaced[k] ? high : Math.min(high, lo[k]! + (high - box.lo[k]!) * SMALL),
+    );
+    return { lo, hi };
   }
-}
-
-/** Widths to begin with: small, but whole for variables that angles of turns replace. */
-function startWidths(proof: Proof): Float64Array {
-  return Float64Array.from(proof.replaced, (replaced) => (replaced ? 1 : START));
-}
-
-/** The box around a place that has the given widths, inside the domain. */
-function boxAt(root: Box, shares: Float64Array, widths: Float64Array): Box {
-  const low = (k: number) => Math.min(Math.max(0, shares[k]! - widths[k]! / 2), 1 - widths[k]!);
-  const range = (k: number) => root.hi[k]! - root.lo[k]!;
-  return {
-    lo: root.lo.map((lo, k) => lo + low(k) * range(k)),
-    hi: root.lo.map((lo, k) => Math.min(root.hi[k]!, lo + (low(k) + widths[k]!) * range(k))),
-  };
 }
 
 /** Numbers in [0, 1), the same every time. */
