@@ -2,10 +2,10 @@
 export type Format = 'f64' | 'f32';
 
 /** First guess for Kepler's equation; the functions stand in src/kepler/starters.ts. */
-export type Starter = 'secondOrder' | 'secant';
+export type Starter = 'firstOrder' | 'secondOrder' | 'thirdOrder' | 'danby' | 'secant';
 
 /** Correction for Kepler's equation; the functions stand in src/kepler/correctors.ts. */
-export type Corrector = 'newton';
+export type Corrector = 'newton' | 'halley' | 'quartic';
 
 /** What makes one variant of a kernel differ from the next. */
 export interface Choices {

@@ -1,7 +1,16 @@
 import type { Graph } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
 import type { Ranges } from '../formula/ranges.ts';
-import type { Turn } from './rule.ts';
+import {
+  direction,
+  doubleAngle,
+  eccentricAnomaly,
+  oppositeAngle,
+  slope,
+  sumOfAngles,
+  trueAnomaly,
+} from './exact-rules.ts';
+import type { ExactRule, Turn } from './rule.ts';
 
 /** Angles of the tick up to this size are kept apart from what setup knows: their sine needs no reduction. */
 const SMALL_ANGLE = Math.PI / 2;
@@ -63,7 +72,7 @@ export class AngleRules {
       case 'cos':
         return this.turn(x).cos;
       case 'kepler':
-        return this.graph.make('add', this.rewrite(x), this.offset(node));
+        return this.anomaly(node);
       default:
         return this.graph.make(node.operation, ...node.args.map((arg) => this.rewrite(arg)));
     }
@@ -130,66 +139,46 @@ export class AngleRules {
     return { cos: this.graph.make('cos', angle), sin: this.graph.make('sin', angle) };
   }
 
-  /** cos(a + b) = cos a cos b - sin a sin b, sin(a + b) = sin a cos b + cos a sin b. */
   private sum(a: Turn, b: Turn): Turn {
-    const { graph } = this;
-    return {
-      cos: graph.make('sub', graph.make('mul', a.cos, b.cos), graph.make('mul', a.sin, b.sin)),
-      sin: graph.make('add', graph.make('mul', a.sin, b.cos), graph.make('mul', a.cos, b.sin)),
-      parts: [a, b],
-    };
+    return { ...this.turned(sumOfAngles, a.cos, a.sin, b.cos, b.sin), parts: [a, b] };
   }
 
-  /** cos(-a) = cos a, sin(-a) = -sin a. */
   private mirror(a: Turn): Turn {
-    return { cos: a.cos, sin: this.graph.make('neg', a.sin) };
+    return this.turned(oppositeAngle, a.cos, a.sin);
   }
 
-  /** sin 2a = (2 sin a) cos a, cos 2a = 1 - (2 sin a) sin a. */
   private double(a: Turn): Turn {
-    const { graph } = this;
-    const twice = graph.make('add', a.sin, a.sin);
-    return {
-      cos: graph.make('sub', graph.constant(1), graph.make('mul', twice, a.sin)),
-      sin: graph.make('mul', twice, a.cos),
-    };
+    return this.turned(doubleAngle, a.cos, a.sin);
   }
 
-  /** E - M by its own equation, D = e sin(M + D): it needs the turn of M and no radians. */
-  private offset(kepler: Node): Node {
+  /** The cosine and sine that a rule gives. */
+  private turned(rule: ExactRule, ...given: readonly Node[]): Turn {
+    const [cos, sin] = rule.apply(this.graph, given) as [Node, Node];
+    return { cos, sin };
+  }
+
+  /** The eccentric anomaly as M and its offset from M: the offset needs the turn of M and no radians. */
+  private anomaly(kepler: Node): Node {
     const [M, e] = kepler.args as [Node, Node];
-    const turn = this.turn(M);
-    return this.graph.make('offset', turn.sin, turn.cos, this.rewrite(e));
+    const { cos, sin } = this.turn(M);
+    return eccentricAnomaly.apply(this.graph, [this.rewrite(M), cos, sin, this.rewrite(e)])[0]!;
   }
 
-  /**
-   * The direction of (x, y): cos = x / h, sin = y / h with h = sqrt(x^2 + y^2).
-   * For the true anomaly h needs no root: (sqrt(1 - e^2) sin E)^2 + (cos E - e)^2 = (1 - e cos E)^2.
-   */
+  private offset(kepler: Node): Node {
+    return this.anomaly(kepler).args.find((arg) => arg.operation === 'offset')!;
+  }
+
+  /** The direction of (x, y), or the true anomaly where it is one. */
   private direction(y: Node, x: Node): Turn {
     const { graph } = this;
     const [sine, cosine] = [this.rewrite(y), this.rewrite(x)];
-    const orbit = trueAnomaly(y, x);
-    const length =
-      orbit === undefined
-        ? graph.make(
-            'sqrt',
-            graph.make('add', graph.make('mul', cosine, cosine), graph.make('mul', sine, sine)),
-          )
-        : graph.make(
-            'sub',
-            graph.constant(1),
-            graph.make('mul', this.rewrite(orbit.e), this.turn(orbit.E).cos),
-          );
-    const inverse = graph.make('div', graph.constant(1), length);
-    const turn = { cos: graph.make('mul', cosine, inverse), sin: graph.make('mul', sine, inverse) };
-    if (orbit === undefined) return turn;
+    const orbit = findTrueAnomaly(y, x);
+    if (orbit === undefined) return this.turned(direction, cosine, sine);
     const E = this.turn(orbit.E);
-    const scaled = graph.make('mul', E.sin, inverse);
-    return {
-      ...turn,
-      anomaly: { E, e: this.rewrite(orbit.e), root: this.rewrite(orbit.root), sine: scaled },
-    };
+    const e = this.rewrite(orbit.e);
+    const inverse = graph.make('div', graph.constant(1), slope(graph, e, E.cos));
+    const anomaly = { E, e, root: this.rewrite(orbit.root), sine: graph.make('mul', E.sin, inverse) };
+    return { ...this.turned(trueAnomaly, cosine, sine, E.cos, e), anomaly };
   }
 }
 
@@ -217,7 +206,7 @@ function holdsDirection(angle: Node): boolean {
 }
 
 /** Recognises y = sqrt(1 - e e) sin E and x = cos E - e. */
-function trueAnomaly(y: Node, x: Node): { E: Node; e: Node; root: Node } | undefined {
+function findTrueAnomaly(y: Node, x: Node): { E: Node; e: Node; root: Node } | undefined {
   if (x.operation !== 'sub' || x.args[0]?.operation !== 'cos' || y.operation !== 'mul') return undefined;
   const E = x.args[0].args[0]!;
   const e = x.args[1]!;

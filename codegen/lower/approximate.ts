@@ -5,7 +5,7 @@ import type { Formula, Node } from '../formula/node.ts';
 import type { Ranges } from '../formula/ranges.ts';
 import type { Choices, Format } from '../kernel/choices.ts';
 import type { Replacement } from './rule.ts';
-import { iterateSizes, iterates } from './solver.ts';
+import { iterateSizes, iterates, solverError } from './solver.ts';
 
 /** Angles up to this size take a polynomial as they are; larger ones are reduced to a quarter turn. */
 const LARGEST_PLAIN_RADIUS = 1.2;
@@ -93,7 +93,8 @@ class Pass {
       radius <= LARGEST_PLAIN_RADIUS
         ? this.plain(node, x, radius, format)
         : this.reduced(node, x, radius, format);
-    this.replacements.set(node, { node: made, error, radius });
+    const rule = `${node.operation === 'sin' ? 'sine' : 'cosine'} by a polynomial${radius <= LARGEST_PLAIN_RADIUS ? '' : ' of the angle reduced to a quarter turn'}`;
+    this.replacements.set(node, { rule, node: made, error, radius });
     return made;
   }
 
@@ -117,8 +118,12 @@ class Pass {
   private offset(node: Node): Node {
     const list = iterates(this.graph, node, this.choices);
     this.iterates.set(node, list);
-    const sizes = iterateSizes(node, list, this.ranges.of(node.args[2]!));
+    const e = this.ranges.of(node.args[2]!);
+    const sizes = iterateSizes(node, list, e);
     for (const [k, iterate] of list.entries()) this.ranges.assert(iterate, { lo: -sizes[k]!, hi: sizes[k]! });
-    return this.visit(list.at(-1)!);
+    const made = this.visit(list.at(-1)!);
+    const rule = "Kepler's equation by a capped solver";
+    this.replacements.set(node, { rule, node: made, error: solverError(this.choices, e) });
+    return made;
   }
 }

@@ -1,5 +1,6 @@
 import { type Graph, inOrder } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
+import { regroupedProduct } from './exact-rules.ts';
 
 /** A formula after the rule, and where its nodes went. */
 export interface Hoisted {
@@ -8,8 +9,7 @@ export interface Hoisted {
 }
 
 /**
- * Exact rule for products: (a b) c = (a c) b. The factors of a product of the tick that setup knows are
- * multiplied there. A product that several nodes read stays as it is: taking it apart would compute it several times, and the
+ * Regroups products: the factors of a product of the tick that setup knows are multiplied there. A product that several nodes read stays as it is: taking it apart would compute it several times, and the
  * formula would lose its shape.
  */
 export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
@@ -31,10 +31,9 @@ export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
     if (node.operation !== 'mul' || node.stage !== 'tick')
       return graph.make(node.operation, ...node.args.map(hoist));
     const factors = node.args.flatMap(factorsOf).map(hoist);
-    const early = factors.filter((factor) => factor.stage !== 'tick');
-    if (early.length < 2) return graph.make('mul', ...node.args.map(hoist));
-    const product = (list: readonly Node[]) => list.reduce((a, b) => graph.make('mul', a, b));
-    return graph.make('mul', product(early), product(factors.filter((factor) => factor.stage === 'tick')));
+    if (factors.filter((factor) => factor.stage !== 'tick').length < 2)
+      return graph.make('mul', ...node.args.map(hoist));
+    return regroupedProduct.apply(graph, factors)[0]!;
   };
   const outputs = formula.outputs.map((output) => ({ ...output, node: hoist(output.node) }));
   const labels = new Map<Node, string>();

@@ -1,5 +1,7 @@
+import { errorsByCell } from '../approximate/kepler-cells.ts';
+import { KeplerConvergence } from '../approximate/kepler-convergence.ts';
 import { Evaluator } from '../formula/evaluate.ts';
-import type { Graph } from '../formula/graph.ts';
+import { Graph } from '../formula/graph.ts';
 import type { Node } from '../formula/node.ts';
 import type { Bounds } from '../formula/ranges.ts';
 import type { Choices } from '../kernel/choices.ts';
@@ -25,6 +27,39 @@ export function iterates(graph: Graph, offset: Node, choices: Choices): readonly
     list.push(applyFunction(graph, CORRECTORS, choices.corrector, [list.at(-1)!, sinM, cosM, e]));
   }
   return list;
+}
+
+const proven = new Map<string, number>();
+
+/**
+ * Proven bound on the error of a capped solver in exact arithmetic, over all mean anomalies, rad.
+ *
+ * @param choices starter, corrector and cap
+ * @param e range of the eccentricity
+ */
+export function solverError(choices: Pick<Choices, 'starter' | 'corrector' | 'cap'>, e: Bounds): number {
+  const { starter, corrector, cap } = choices;
+  const key = `${starter} ${corrector} ${cap} ${e.lo} ${e.hi}`;
+  const known = proven.get(key);
+  if (known !== undefined) return known;
+  const graph = new Graph();
+  const [sinM, cosM, eNode] = ['sinM', 'cosM', 'e'].map((name) => graph.input(name, 'tick')) as [
+    Node,
+    Node,
+    Node,
+  ];
+  const guess = applyFunction(graph, STARTERS, starter, [sinM, cosM, eNode]);
+  const convergence = new KeplerConvergence({ graph, sinM, cosM, e: eNode, guess }, corrector);
+  const table = errorsByCell(e, (M, cell) => {
+    const exact = convergence.exact(M, cell);
+    let error = convergence.start(M, cell, exact);
+    for (let step = 0; step < cap; step++) error = convergence.step(M, cell, exact, error);
+    const most = Math.max(-error.lo, error.hi);
+    return most < Infinity ? { error: most, rounding: most } : { error: Infinity, rounding: 0 };
+  });
+  const error = table.offset({ lo: -Math.PI, hi: Math.PI }, e);
+  proven.set(key, error);
+  return error;
 }
 
 /**

@@ -1,9 +1,15 @@
-import type { SolverErrors, Span } from './tape.ts';
+import type { Bounds } from '../formula/ranges.ts';
 
 /** Bound on the error of a solver over a cell, and the part of it that the lines of the last step round, rad. */
 export interface CellError {
   readonly error: number;
   readonly rounding: number;
+}
+
+/** Errors of a solver, by mean anomaly and eccentricity. */
+export interface ErrorsByCell {
+  /** Largest error for intervals of M (any turn, rad) and e, rad. */
+  offset(M: Bounds, e: Bounds): number;
 }
 
 /** Cells of the mean anomaly in the table of errors. */
@@ -24,7 +30,7 @@ const EDGE = 1e-9;
  * @param e range of the eccentricity
  * @param cellError bound over a cell
  */
-export function solverTable(e: Span, cellError: (M: Span, e: Span) => CellError): SolverErrors {
+export function errorsByCell(e: Bounds, cellError: (M: Bounds, e: Bounds) => CellError): ErrorsByCell {
   const M = anomalyEdges(e.hi);
   const edges = eccentricityEdges(e);
   const rows = edges.length - 1;
@@ -66,7 +72,7 @@ function anomalyEdges(e: number): Float64Array {
 }
 
 /** Edges of cells over a range of the eccentricity: equal steps of log(1 - e). */
-function eccentricityEdges(e: Span): Float64Array {
+function eccentricityEdges(e: Bounds): Float64Array {
   const fall = Math.log((1 - e.lo) / (1 - e.hi));
   const cells = Math.max(CELLS_OF_E.least, Math.ceil(fall * CELLS_OF_E.perFactor));
   const edges = Float64Array.from(
@@ -91,9 +97,9 @@ function place(edges: Float64Array, x: number): number {
 
 /** Error over a cell: the largest of its quarters' where that is worth it. */
 function divided(
-  cellError: (M: Span, e: Span) => CellError,
-  M: Span,
-  e: Span,
+  cellError: (M: Bounds, e: Bounds) => CellError,
+  M: Bounds,
+  e: Bounds,
   depth: number,
   before = Infinity,
 ): number {
