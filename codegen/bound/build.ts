@@ -142,7 +142,7 @@ export class Builder {
         return { kind, args: node.args.map((arg) => this.unrounded(arg)), format: 'exact', line };
       return {
         kind,
-        args: node.args.map((arg) => this.real(arg, stage)),
+        args: node.args.map((arg, k) => this.constantRead(arg, line, k) ?? this.real(arg, stage)),
         format: this.formatOf(stage),
         line,
       };
@@ -213,7 +213,9 @@ export class Builder {
     if (node.stage === 'constant') return this.constant(node, this.formatOf(stage));
     return this.once(`loose ${this.id(node)}`, () => {
       const line = this.line(node);
-      const args = node.args.map((arg) => this.loose(arg, stage, leaves));
+      const args = node.args.map(
+        (arg, k) => this.constantRead(arg, line, k) ?? this.loose(arg, stage, leaves),
+      );
       return {
         kind: realKind(node),
         args,
@@ -267,18 +269,23 @@ export class Builder {
     };
   }
 
+  /** The constant that a line reads as its argument: its value is the one that stands in the line, whatever the formula says. */
+  private constantRead(node: Node, line: number, argument: number): number | undefined {
+    if (node.stage !== 'constant' || line < 0 || this.blocks === null) return undefined;
+    const { lines } = this.lowered.kernel;
+    const read = lines[lines[line]!.args[argument]!];
+    return read?.operation === 'constant' ? this.constantOf(node, read.value) : undefined;
+  }
+
   private constant(node: Node, format: Format): number {
-    return this.once(`constant ${format} ${this.id(node)}`, () => {
-      const evaluator = new Evaluator([node]);
-      evaluator.run({});
-      const exact = evaluator.value(node);
-      const value = format === 'f32' && this.blocks !== null ? Math.fround(exact.hi) : exact.hi;
-      return {
-        kind: 'constant',
-        value,
-        error: Math.abs(value - exact.hi - exact.lo) * (1 + 2 ** -50),
-        line: -1,
-      };
+    const { hi } = exactValue(node);
+    return this.constantOf(node, format === 'f32' && this.blocks !== null ? Math.fround(hi) : hi);
+  }
+
+  private constantOf(node: Node, value: number): number {
+    return this.once(`constant ${value} ${this.id(node)}`, () => {
+      const { hi, lo } = exactValue(node);
+      return { kind: 'constant', value, error: Math.abs(value - hi - lo) * (1 + 2 ** -50), line: -1 };
     });
   }
 
@@ -313,6 +320,13 @@ export class Builder {
 /** The line that rounds another to float32, or -1. */
 export function roundLineOf(kernel: Kernel, line: number): number {
   return kernel.lines.findIndex((candidate) => candidate.operation === 'round' && candidate.args[0] === line);
+}
+
+/** The value of a node that depends on nothing, in double-double arithmetic. */
+function exactValue(node: Node): { readonly hi: number; readonly lo: number } {
+  const evaluator = new Evaluator([node]);
+  evaluator.run({});
+  return evaluator.value(node);
 }
 
 function stageOf(node: Node): Stage {
