@@ -1,8 +1,8 @@
 import type { Backward } from './backward.ts';
 import type { Forward } from './forward.ts';
 import { freeTurns } from './free-turns.ts';
-import { NET } from './norm.ts';
-import { halfUnit } from './rounding.ts';
+import { sphereMaximum } from './norm.ts';
+import { rotationRounding } from './rotation-rounding.ts';
 import type { Entry } from './tape.ts';
 
 /** Rounding of all sums below, relative. */
@@ -90,12 +90,12 @@ export class ErrorVector {
    * by a sin and a cos.
    */
   private collectTurn(k: number): void {
-    const { local, localSine, angle, value, sine, deviation } = this.forward;
+    const { local, localSine, localBoth, angle, value, sine, deviation } = this.forward;
     const [a, b] = [local[k]!, localSine[k]!];
     if (a === 0 && b === 0) return;
     const grow = 1 + 4 * deviation[k]!;
     if (this.free[k] || angle.hi[k]! - angle.lo[k]! > WIDE_ANGLE)
-      return this.collectPair(k, Math.sqrt(a * a + b * b) * grow);
+      return this.collectPair(k, localBoth[k]! * grow);
     this.collectComponent(k, a * grow, value.lo[k]!, value.hi[k]!, -sine.hi[k]!, -sine.lo[k]!);
     this.collectComponent(k, b * grow, sine.lo[k]!, sine.hi[k]!, value.lo[k]!, value.hi[k]!);
   }
@@ -138,12 +138,8 @@ export class ErrorVector {
     const { node } = this.forward.tape;
     if (node === null) return 0;
     const { value, deviation } = this.forward;
-    const size = (k: number) => Math.max(-value.lo[k]!, value.hi[k]!) * (1 + deviation[node.turn]!);
-    const [x, y] = [size(node.X), size(node.Y)];
-    const { format } = node;
-    const [ex, ey] = [halfUnit(x, format), halfUnit(y, format)];
-    const sum = ex + ey + halfUnit(Math.hypot(x, y) + ex + ey, format);
-    return sum * Math.SQRT2;
+    const range = (k: number) => ({ lo: value.lo[k]!, hi: value.hi[k]! });
+    return rotationRounding(range(node.X), range(node.Y), deviation[node.turn]!, node.format);
   }
 
   /** Support function: the largest error in a direction, for a direction of the length 1. */
@@ -182,18 +178,15 @@ export class ErrorVector {
     return parts.map((part) => part / whole);
   }
 
-  /** The direction of the net in which the error can be largest. */
+  /** A direction in which the error can be largest. */
   worstDirection(): readonly number[] {
-    if (this.count === 1) return [1];
-    return NET.directions.reduce((a, b) => (this.support(b) > this.support(a) ? b : a));
+    return this.count === 1 ? [1] : sphereMaximum((direction) => this.support(direction)).direction;
   }
 
   /** Bound on the length of the error vector. */
   norm(): number {
     if (this.count === 1) return this.support([1]);
-    let most = 0;
-    for (const direction of NET.directions) most = Math.max(most, this.support(direction));
-    return most * NET.factor * this.frameGrowth() * SLACK;
+    return sphereMaximum((direction) => this.support(direction)).bound * this.frameGrowth() * SLACK;
   }
 
   /** Bounds on the parts of the error along the three axes. */

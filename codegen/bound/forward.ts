@@ -1,8 +1,12 @@
 import * as interval from '../numbers/interval.ts';
 import { freeTurns } from './free-turns.ts';
+import { ProductRounding } from './product-rounding.ts';
 import { RealRanges, SLACK } from './real-ranges.ts';
 import { halfUnit } from './rounding.ts';
-import type { Entry, Tape } from './tape.ts';
+import type { Entry, SineErrors, Tape } from './tape.ts';
+
+/** Rounding of products of turns in each format. */
+const PRODUCTS = { f64: new ProductRounding('f64'), f32: new ProductRounding('f32') } as const;
 
 /** More than half a turn: an angle that may be any. */
 const WHOLE = 3.2;
@@ -22,6 +26,8 @@ export class Forward extends RealRanges {
   readonly angle: interval.Intervals;
   /** Local error of the sine of turns. */
   readonly localSine: Float64Array;
+  /** Length of both local errors of turns at once: no more than that of the two together. */
+  readonly localBoth: Float64Array;
   /** Distance of the computed point of a turn from the unit circle at its angle. */
   readonly deviation: Float64Array;
   private readonly work: interval.Intervals;
@@ -42,6 +48,7 @@ export class Forward extends RealRanges {
     this.sine = new interval.Intervals(n);
     this.angle = new interval.Intervals(n);
     this.localSine = new Float64Array(n);
+    this.localBoth = new Float64Array(n);
     this.deviation = new Float64Array(n);
     this.work = new interval.Intervals(8);
     this.names = new Map(variables.map((name, index) => [name, index]));
@@ -120,7 +127,7 @@ export class Forward extends RealRanges {
     this.setAngle(k, this.value.lo[angle]!, this.value.hi[angle]!);
     this.applyCut(k, lo, hi);
     const [from, to] = [this.angle.lo[k]!, this.angle.hi[k]!];
-    this.setLocal(k, entry.errors?.cos(from, to) ?? 0, entry.errors?.sin(from, to) ?? 0, 0);
+    this.setTurn(k, entry.errors, from, to);
     this.components(k);
   }
 
@@ -149,13 +156,20 @@ export class Forward extends RealRanges {
       ) as [number, number];
       this.setLocal(k, cos, sin, carried);
     } else if (format === 'exact') this.setLocal(k, 0, 0, carried);
-    else
+    else {
+      const { cos, sin, both } = PRODUCTS[format].errors(
+        this.angle.lo[k]!,
+        this.angle.hi[k]!,
+        carried + 4 * halfUnit(1, format),
+      );
       this.setLocal(
         k,
-        this.pairError(k, a, b, format, true),
-        this.pairError(k, a, b, format, false),
+        Math.min(cos, this.pairError(k, a, b, format, true)),
+        Math.min(sin, this.pairError(k, a, b, format, false)),
         carried,
+        both,
       );
+    }
     this.components(k);
   }
 
@@ -184,6 +198,7 @@ export class Forward extends RealRanges {
     this.error[k] = (a + b) * SLACK;
     this.local[k] = 0;
     this.localSine[k] = 0;
+    this.localBoth[k] = 0;
     this.deviation[k] = Math.sqrt(a * a + b * b) * SLACK;
     this.angleOf(k, cos, sin);
     this.components(k);
@@ -302,17 +317,21 @@ export class Forward extends RealRanges {
     for (const index of target === k ? [k] : [target, k]) {
       this.setAngle(index, lo, hi);
       const own = this.tape.entries[index]!;
-      if (own.kind === 'turn')
-        this.setLocal(index, own.errors?.cos(lo, hi) ?? 0, own.errors?.sin(lo, hi) ?? 0, 0);
+      if (own.kind === 'turn') this.setTurn(index, own.errors, lo, hi);
       if (own.kind === 'rounded-turn') this.roundedTurn(index, own.turn);
       else this.components(index);
     }
   }
 
-  private setLocal(k: number, cos: number, sin: number, carried: number): void {
+  private setTurn(k: number, errors: SineErrors | null, lo: number, hi: number): void {
+    this.setLocal(k, errors?.cos(lo, hi) ?? 0, errors?.sin(lo, hi) ?? 0, 0, errors?.both(lo, hi) ?? 0);
+  }
+
+  private setLocal(k: number, cos: number, sin: number, carried: number, both = Infinity): void {
     this.local[k] = cos;
     this.localSine[k] = sin;
-    this.deviation[k] = (carried + Math.sqrt(cos * cos + sin * sin)) * SLACK;
+    this.localBoth[k] = Math.min(both, Math.sqrt(cos * cos + sin * sin) * SLACK);
+    this.deviation[k] = (carried + this.localBoth[k]!) * SLACK;
   }
 
   /** Ranges of cosine and sine: of the angles, widened by the deviation. */

@@ -21,11 +21,13 @@ export const LEAST: Readonly<Record<Format, number>> = { f64: 2 ** -1075, f32: 2
 
 /**
  * Largest error of one rounding to nearest of a result whose magnitude is at most `magnitude`: half a unit in the
- * last place of its binade.
+ * last place of its binade. Just above a power of two it is less, since that power is a number of the format.
  */
 export function halfUnit(magnitude: number, format: Format): number {
   if (!(magnitude < Infinity)) return Infinity;
-  return Math.max(leadingPower(magnitude) * HALF_UNIT[format], LEAST[format]);
+  const power = leadingPower(magnitude);
+  const half = power * HALF_UNIT[format];
+  return Math.max(Math.min(half, Math.max(half / 2, magnitude - power)), LEAST[format]);
 }
 
 /** Bits of a significand of each format after the leading one. */

@@ -52,22 +52,25 @@ function plainErrors(kernel: Kernel, lines: SineLines, radius: number): SineErro
     const lo = Math.max(-radius, cell * width - radius - width * EDGE);
     return analyse(lo, Math.min(radius, (cell + 1) * width - radius + width * EDGE));
   });
-  const look = (component: 0 | 1) => (lo: number, hi: number) => {
-    if (!(lo >= -radius && hi <= radius)) return Infinity;
-    const first = Math.max(0, Math.floor((lo + radius) / width - 1e-9));
-    const last = Math.min(CELLS - 1, Math.floor((hi + radius) / width + 1e-9));
-    let most = 0;
-    for (let cell = first; cell <= last; cell++) most = Math.max(most, cells[cell]![component]);
-    return most;
+  const look = (size: (cell: Cell) => number) => {
+    const sizes = Float64Array.from(cells, size);
+    return (lo: number, hi: number) => {
+      if (!(lo >= -radius && hi <= radius)) return Infinity;
+      const first = Math.max(0, Math.floor((lo + radius) / width - 1e-9));
+      const last = Math.min(CELLS - 1, Math.floor((hi + radius) / width + 1e-9));
+      let most = 0;
+      for (let cell = first; cell <= last; cell++) most = Math.max(most, sizes[cell]!);
+      return most;
+    };
   };
-  return { periodic: false, cos: look(0), sin: look(1) };
+  return { periodic: false, cos: look(cosine), sin: look(sine), both: look(length) };
 }
 
 /** Errors of lines that reduce the angle, by cells of the circle; every turn that the radius allows counts. */
 function reducedErrors(kernel: Kernel, lines: SineLines, floor: number, radius: number): SineErrors {
   const width = (2 * Math.PI) / CELLS;
   const analyse = reducedCells(kernel, lines, floor);
-  const cells: [number, number][] = Array.from({ length: CELLS }, () => [Infinity, Infinity]);
+  const cells: Cell[] = Array.from({ length: CELLS }, () => [Infinity, Infinity]);
   const seen = new Uint8Array(CELLS);
   const outermost = Math.ceil(radius / width + 1e-6);
   for (let cell = -outermost; cell < outermost; cell++) {
@@ -77,20 +80,29 @@ function reducedErrors(kernel: Kernel, lines: SineLines, floor: number, radius: 
     cells[place] = [Math.max(cos, oldCos), Math.max(sin, oldSin)];
     seen[place] = 1;
   }
-  const whole = [0, 1].map((component) => Math.max(...cells.map((cell) => cell[component]!)));
-  const look = (component: 0 | 1) => (lo: number, hi: number) => {
-    if (!(hi - lo < 2 * Math.PI)) return whole[component]!;
-    const last = Math.floor(hi / width + 1e-9);
-    let most = 0;
-    for (let cell = Math.floor(lo / width - 1e-9); cell <= last; cell++) {
-      most = Math.max(most, cells[((cell % CELLS) + CELLS) % CELLS]![component]);
-    }
-    return most;
+  const look = (size: (cell: Cell) => number) => {
+    const sizes = Float64Array.from(cells, size);
+    const whole = Math.max(...sizes);
+    return (lo: number, hi: number) => {
+      if (!(hi - lo < 2 * Math.PI)) return whole;
+      const last = Math.floor(hi / width + 1e-9);
+      let most = 0;
+      for (let cell = Math.floor(lo / width - 1e-9); cell <= last; cell++)
+        most = Math.max(most, sizes[((cell % CELLS) + CELLS) % CELLS]!);
+      return most;
+    };
   };
-  return { periodic: true, cos: look(0), sin: look(1) };
+  return { periodic: true, cos: look(cosine), sin: look(sine), both: look(length) };
 }
 
-type Analyse = (lo: number, hi: number) => readonly [cos: number, sin: number];
+/** Errors of the cosine and of the sine over a cell. */
+type Cell = readonly [cos: number, sin: number];
+
+const cosine = ([cos]: Cell): number => cos;
+const sine = ([, sin]: Cell): number => sin;
+const length = ([cos, sin]: Cell): number => Math.sqrt(cos * cos + sin * sin) * (1 + 2 ** -50);
+
+type Analyse = (lo: number, hi: number) => Cell;
 
 /** Lines that are polynomials of the angle itself. */
 function plainCells(kernel: Kernel, lines: SineLines, radius: number): Analyse {

@@ -83,7 +83,12 @@ class Solver {
       [this.e, 'e'],
     ]);
     if (previous !== undefined) stops.set(previous, 'D');
-    const flat: SineErrors = { periodic: true, cos: () => this.room, sin: () => this.room };
+    const flat: SineErrors = {
+      periodic: true,
+      cos: () => this.room,
+      sin: () => this.room,
+      both: () => 2 * this.room,
+    };
     const given = new Map([[this.turn, flat]]);
     const builder = new Builder(this.lowered, this.blocks, inOrder([node]), stops, given);
     return new Analysis(builder.tape([builder.real(node, 'tick')]));

@@ -8,6 +8,8 @@ export interface SineErrors {
   cos(lo: number, hi: number): number;
   /** Largest |computed - sin| for angles in an interval, rad. */
   sin(lo: number, hi: number): number;
+  /** Largest length of both errors at once, for angles in an interval, rad. */
+  both(lo: number, hi: number): number;
 }
 
 /** Local error of a capped solver, by mean anomaly and eccentricity: see solver-block.ts. */
