@@ -73,8 +73,13 @@ async function main(): Promise<void> {
     const variant = makeVariant(task, choices);
     const real = await runOnRecords(task, variant, healthy);
     const names = task.formula.inputs.map((input) => input.name);
-    const [worst] = observe(await judgeOf(task, variant), task.domain, names, FULL_EFFORT, (share) =>
-      progress.show(variantName(choices), share),
+    const [worst] = observe(
+      await judgeOf(task, variant),
+      variant.kernel,
+      task.domain,
+      names,
+      FULL_EFFORT,
+      (share) => progress.show(variantName(choices), share),
     ) as [Observed];
     const { bytes, minified_bytes } = await codeSize(variant.code);
     rows.push([

@@ -1,8 +1,8 @@
 import { readFileSync } from 'node:fs';
 import benny from 'benny';
+import { Random } from '../../codegen/numbers/random.ts';
 import { importKernel } from '../../codegen/observe/module.ts';
 import { Points } from '../../codegen/observe/points.ts';
-import { Random } from '../../codegen/observe/random.ts';
 import { type BroadcastElements, position } from '../../src/models/broadcast.ts';
 import { GPS } from '../../src/systems/gps.ts';
 import { gpsLnav } from '../../src/systems/gps-lnav.ts';

@@ -6,7 +6,7 @@ import { Proof } from './proof.ts';
 import { type ProofEffort, subdivide } from './search.ts';
 
 /** The effort behind every certified figure of a certificate. */
-export const PROOF_EFFORT: ProofEffort = { boxes: 30_000 };
+export const PROOF_EFFORT: ProofEffort = { boxes: 60_000 };
 
 /** What is proven of one output group of a kernel. */
 export interface GroupProof {

@@ -1,4 +1,5 @@
 import type { Domain } from '../../src/models/description.ts';
+import { Random } from '../numbers/random.ts';
 import type { Proof } from './proof.ts';
 
 type Point = Readonly<Record<string, number>>;
@@ -17,13 +18,13 @@ const STEPS = 250;
  */
 export function largestPointwise(proof: Proof, domain: Domain): { bound: number; points: readonly Point[] } {
   const names = Object.keys(domain);
-  const random = generator();
+  const random = new Random(54321);
   const clamp = (name: string, x: number) => Math.min(Math.max(x, domain[name]!.min), domain[name]!.max);
   const draw = (): Point =>
     Object.fromEntries(
       names.map((name) => {
         const { min, max } = domain[name]!;
-        return [name, clamp(name, min + (max - min) * (random() * 1.3 - 0.15))];
+        return [name, clamp(name, min + (max - min) * (random.next() * 1.3 - 0.15))];
       }),
     );
   const drawn = Array.from({ length: DRAWN }, () => {
@@ -37,10 +38,10 @@ export function largestPointwise(proof: Proof, domain: Domain): { bound: number;
       const point: Record<string, number> = { ...best.point };
       const share = 0.3 * 10 ** ((-3 * step) / STEPS);
       for (let k = 0; k < 3; k++) {
-        const name = names[Math.floor(random() * names.length)]!;
+        const name = names[random.below(names.length)]!;
         point[name] = clamp(
           name,
-          point[name]! + (domain[name]!.max - domain[name]!.min) * share * (2 * random() - 1),
+          point[name]! + (domain[name]!.max - domain[name]!.min) * share * (2 * random.next() - 1),
         );
       }
       const bound = proof.boundAt(point);
@@ -50,13 +51,4 @@ export function largestPointwise(proof: Proof, domain: Domain): { bound: number;
   });
   tops.sort((a, b) => b.bound - a.bound);
   return { bound: tops[0]!.bound, points: tops.map(({ point }) => point) };
-}
-
-/** Numbers in [0, 1), the same every time. */
-function generator(): () => number {
-  let state = 54321;
-  return () => {
-    state = (Math.imul(state, 1664525) + 1013904223) >>> 0;
-    return state / 2 ** 32;
-  };
 }

@@ -1,3 +1,4 @@
+import { Random } from '../numbers/random.ts';
 import type { Box, Proof } from './proof.ts';
 
 /** Width of the small boxes in which the variables are tried one by one, as a share of the box. */
@@ -18,7 +19,7 @@ export class WidthCosts {
   /** Boxes evaluated so far. */
   evaluations = 0;
   private readonly proof: Proof;
-  private readonly random: () => number = generator();
+  private readonly random = new Random(12345);
 
   constructor(proof: Proof) {
     this.proof = proof;
@@ -55,20 +56,11 @@ export class WidthCosts {
   private small(box: Box): Box {
     const { replaced } = this.proof;
     const lo = box.lo.map((low, k) =>
-      replaced[k] ? low : low + (box.hi[k]! - low) * this.random() * (1 - SMALL),
+      replaced[k] ? low : low + (box.hi[k]! - low) * this.random.next() * (1 - SMALL),
     );
     const hi = box.hi.map((high, k) =>
       replaced[k] ? high : Math.min(high, lo[k]! + (high - box.lo[k]!) * SMALL),
     );
     return { lo, hi };
   }
-}
-
-/** Numbers in [0, 1), the same every time. */
-function generator(): () => number {
-  let state = 12345;
-  return () => {
-    state = (Math.imul(state, 1103515245) + 12345) & 0x7fffffff;
-    return state / 0x80000000;
-  };
 }

@@ -1,8 +1,8 @@
 import type { Domain } from '../../src/models/description.ts';
 import { digest } from '../files/digest.ts';
+import { Random } from '../numbers/random.ts';
 import type { Judge } from '../observe/judge.ts';
 import { Points } from '../observe/points.ts';
-import { Random } from '../observe/random.ts';
 
 const COUNT = 1024;
 

@@ -10,7 +10,7 @@ import { digest } from '../files/digest.ts';
 import { printFormula } from '../formula/text.ts';
 import { Judge } from '../observe/judge.ts';
 import { importKernel } from '../observe/module.ts';
-import type { Candidate } from '../observe/observe.ts';
+import type { Worst } from '../observe/observe.ts';
 import { compareKernel } from '../parse/compare.ts';
 import { parseKernel } from '../parse/parse.ts';
 import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
@@ -27,7 +27,7 @@ import { outputsDigest } from './outputs-digest.ts';
  */
 export async function recheck(folder: string): Promise<readonly Finding[]> {
   const certificate = parse<Certificate>(folder, FILES.certificate);
-  const worst = parse<Record<string, readonly Candidate[]>>(folder, FILES.worst);
+  const worst = parse<Record<string, readonly Worst[]>>(folder, FILES.worst);
   const code = read(folder, FILES.code);
   const allowed = Object.fromEntries(
     Object.entries(certificate.error).map(([key, entry]) => [key, entry.allowed]),
@@ -137,7 +137,7 @@ async function replay(
   folder: string,
   certificate: Certificate,
   task: Task,
-  worst: Readonly<Record<string, readonly Candidate[]>>,
+  worst: Readonly<Record<string, readonly Worst[]>>,
   code: string,
 ): Promise<readonly Finding[]> {
   const judge = new Judge(task.formula, await importKernel(code), task.model.frameRate);

@@ -7,7 +7,7 @@ import { candidates } from './candidates.ts';
 import { judgeOf, makeVariant, type Task, type Variant } from './variant.ts';
 
 /** A short look that can only rule variants out: an error seen is an error. */
-const FIRST_LOOK: Effort = { points: 2000, starts: 1, steps: 0, seed: 3 };
+const FIRST_LOOK: Effort = { points: 2000, places: 0, draws: 0, pool: 1, steps: 0, seed: 3 };
 
 /** A limit that a variant breaks. */
 export interface Excess {
@@ -73,7 +73,7 @@ export async function look(
   progress: (share: number) => void,
 ): Promise<readonly Observed[]> {
   const names = task.formula.inputs.map((input) => input.name);
-  return observe(await judgeOf(task, variant), task.domain, names, effort, progress);
+  return observe(await judgeOf(task, variant), variant.kernel, task.domain, names, effort, progress);
 }
 
 /** A variant by its arithmetic and cap, such as `f64, cap 2`. */

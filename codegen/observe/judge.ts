@@ -3,6 +3,7 @@ import type { Formula, Output } from '../formula/node.ts';
 import { dot, orbitAxes, type Vector } from './axes.ts';
 import type { KernelModule } from './module.ts';
 import type { Point } from './points.ts';
+import { type Screen, screenOf } from './screen.ts';
 
 /** Error of one output group at a point: the length of the error vector, in the group's unit, and its parts. */
 export interface GroupError {
@@ -29,6 +30,8 @@ export class Judge {
   private readonly state: Float64Array;
   private readonly out: Float64Array;
   private readonly frameRate: number;
+  private readonly screen: Screen;
+  private readonly screened: Float64Array;
 
   /**
    * @param formula the model's formula
@@ -44,6 +47,8 @@ export class Judge {
     this.members = this.groups.map((group) => members.filter((member) => member.group === group));
     this.state = new Float64Array(module.stateWords);
     this.out = new Float64Array(formula.outputs.length);
+    this.screen = screenOf(formula);
+    this.screened = new Float64Array(formula.outputs.length);
   }
 
   /** Runs the kernel; returns its status. The outputs stay in `outputs`. */
@@ -67,6 +72,21 @@ export class Judge {
     this.evaluator.run(point);
     return new Map(
       this.groups.map((group, k) => [group, { size: Math.hypot(...this.differences(this.members[k]!)) }]),
+    );
+  }
+
+  /** Size of the error of every group against the formula in float64: of float32 kernels, to some digits. */
+  roughErrors(point: Point): ReadonlyMap<string, number> {
+    const status = this.run(point);
+    if (status !== 0) throw new RangeError(`the kernel gives status ${status} at ${JSON.stringify(point)}`);
+    const { out, screened } = this;
+    this.screen(point, screened);
+    return new Map(
+      this.groups.map((group, k) => {
+        let sum = 0;
+        for (const { index } of this.members[k]!) sum += (out[index]! - screened[index]!) ** 2;
+        return [group, Math.sqrt(sum)];
+      }),
     );
   }
 

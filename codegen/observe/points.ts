@@ -1,5 +1,5 @@
 import type { Domain } from '../../src/models/description.ts';
-import type { Random } from './random.ts';
+import type { Random } from '../numbers/random.ts';
 
 /** Values of all inputs, by name. */
 export type Point = Readonly<Record<string, number>>;
@@ -26,18 +26,6 @@ export class Points {
         u < 1 / 12 ? min : u > 11 / 12 ? max : clamp(min + (max - min) * this.random.next(), min, max);
     }
     return point;
-  }
-
-  /** A point beside another: some coordinates moved by a normal step of the given share of their range. */
-  near(point: Point, share: number): Point {
-    const moved: Record<string, number> = { ...point };
-    const count = 1 + this.random.below(4);
-    for (let k = 0; k < count; k++) {
-      const name = this.names[this.random.below(this.names.length)]!;
-      const { min, max } = this.domain[name]!;
-      moved[name] = clamp(point[name]! + (max - min) * share * this.random.normal(), min, max);
-    }
-    return moved;
   }
 }
 

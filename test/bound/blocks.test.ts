@@ -5,7 +5,7 @@ import { findTurns } from '../../codegen/bound/turns.ts';
 import { inOrder } from '../../codegen/formula/graph.ts';
 import { Pairs, set } from '../../codegen/numbers/double-double.ts';
 import { keplerOffset, sinCos } from '../../codegen/numbers/double-double-functions.ts';
-import { Random } from '../../codegen/observe/random.ts';
+import { Random } from '../../codegen/numbers/random.ts';
 import { runLines, subject } from './lines.ts';
 
 const SUBJECTS = [

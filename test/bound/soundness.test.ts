@@ -2,8 +2,8 @@ import { describe, expect, test } from 'vitest';
 import { Proof } from '../../codegen/bound/proof.ts';
 import { subdivide } from '../../codegen/bound/search.ts';
 import { describeVariant, judgeOf } from '../../codegen/choose/variant.ts';
+import { Random } from '../../codegen/numbers/random.ts';
 import { Points } from '../../codegen/observe/points.ts';
-import { Random } from '../../codegen/observe/random.ts';
 import { runLines, subject } from './lines.ts';
 
 const SUBJECTS = [

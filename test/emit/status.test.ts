@@ -1,8 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
+import { Random } from '../../codegen/numbers/random.ts';
 import { importKernel, type KernelModule } from '../../codegen/observe/module.ts';
 import { Points } from '../../codegen/observe/points.ts';
-import { Random } from '../../codegen/observe/random.ts';
 import { MODELS } from '../../src/systems/catalogue.ts';
 import { type Folder, folders } from '../generated/folders.ts';
 

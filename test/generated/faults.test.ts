@@ -3,6 +3,7 @@ import { fileURLToPath } from 'node:url';
 import { describe, expect, test } from 'vitest';
 import type { Certificate } from '../../codegen/certificate/certificate.ts';
 import { taskOf } from '../../codegen/choose/task.ts';
+import { makeVariant } from '../../codegen/choose/variant.ts';
 import { inspectSource } from '../../codegen/inspect/inspection.ts';
 import { Judge } from '../../codegen/observe/judge.ts';
 import { importKernel } from '../../codegen/observe/module.ts';
@@ -234,9 +235,10 @@ async function caughtBy(folder: string, code: string): Promise<readonly Catch[]>
   const judge = new Judge(task.formula, await importKernel(code), task.model.frameRate);
   const [seen] = observe(
     judge,
+    makeVariant(task, certificate.choices).kernel,
     task.domain,
     task.formula.inputs.map((input) => input.name),
-    { points: 3000, starts: 1, steps: 0, seed: 41 },
+    { points: 3000, places: 0, draws: 0, pool: 1, steps: 0, seed: 41 },
   );
   return [
     ...(counts ? ['counts' as const] : []),

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
+import { Random } from '../../codegen/numbers/random.ts';
 import { importKernel } from '../../codegen/observe/module.ts';
 import { Points } from '../../codegen/observe/points.ts';
-import { Random } from '../../codegen/observe/random.ts';
 import { compareKernel } from '../../codegen/parse/compare.ts';
 import { parseKernel } from '../../codegen/parse/parse.ts';
 import type { ParsedArgument, ParsedKernel } from '../../codegen/parse/parsed.ts';

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { Evaluator } from '../../codegen/formula/evaluate.ts';
+import { Random } from '../../codegen/numbers/random.ts';
 import { Points } from '../../codegen/observe/points.ts';
-import { Random } from '../../codegen/observe/random.ts';
 import { readModel } from '../../codegen/read/model.ts';
 import { type BroadcastElements, type ClockParameters, clock, position } from '../../src/models/broadcast.ts';
 import { type ClassicalElements, position as twoBodyPosition } from '../../src/models/two-body.ts';
