@@ -1,9 +1,11 @@
 import type { Domain } from '../../src/models/description.ts';
 import type { Lowered } from '../lower/lower.ts';
+import type { Intervals } from '../numbers/interval.ts';
 import { KernelBlocks } from './blocks.ts';
 import { largestPointwise } from './pointwise.ts';
 import { Proof } from './proof.ts';
 import { type ProofEffort, subdivide } from './search.ts';
+import type { Span } from './tape.ts';
 
 /** The effort behind every certified figure of a certificate. */
 export const PROOF_EFFORT: ProofEffort = { boxes: 60_000 };
@@ -22,6 +24,8 @@ export interface GroupProof {
   readonly boxes: number;
   /** Share of lines in the bound of the worst box, by line of the kernel, 0 to 1. */
   readonly shares: ReadonlyMap<number, number>;
+  /** Ranges of the values of lines over the whole domain, as far as the proof knows them. */
+  readonly ranges: ReadonlyMap<number, Span>;
 }
 
 /**
@@ -51,12 +55,31 @@ export function certify(
       axes: found.axes,
       boxes: found.boxes,
       shares: shares(proof, found.worst[0]!),
+      ranges: rangesOfLines(proof),
     };
   });
 }
 
 function domainOf(lowered: Lowered, proof: Proof): Domain {
   return Object.fromEntries(proof.inputs.map((name) => [name, lowered.kernel.domain[name]!]));
+}
+
+/** Ranges of lines over the whole domain: of numbers, and of the cosines and sines of turns. */
+function rangesOfLines(proof: Proof): ReadonlyMap<number, Span> {
+  proof.evaluate(proof.root());
+  const { value, sine } = proof.forward;
+  const ranges = new Map<number, Span>();
+  const note = (line: number, from: Intervals, k: number): void => {
+    if (line < 0) return;
+    const before = ranges.get(line) ?? { lo: -Infinity, hi: Infinity };
+    ranges.set(line, { lo: Math.max(before.lo, from.lo[k]!), hi: Math.min(before.hi, from.hi[k]!) });
+  };
+  for (const [k, entry] of proof.tape.entries.entries()) {
+    if (entry.kind === 'leaf') continue;
+    note(entry.line, value, k);
+    if ('sinLine' in entry) note(entry.sinLine, sine, k);
+  }
+  return ranges;
 }
 
 /** How much each line contributes to the bound over a box, in the direction in which it is largest. */

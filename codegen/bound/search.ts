@@ -22,12 +22,15 @@ export interface Certified {
 /** Costs of widths are measured at each of the first generations of halving, and from then on once in so many. */
 const LASTING = 8;
 
+/** A bound that is this near to that of a small box is not worth more boxes. */
+const CLOSE = 1.001;
+
 /** Boxes that are kept for the observed side. */
 const KEPT = 64;
 
 /**
  * Best-first subdivision: the box with the largest bound is halved in the variable whose width costs most there, until
- * the effort is used up.
+ * the effort is used up or nothing is left to gain.
  *
  * @param proof bounds over boxes
  * @param effort how many boxes
@@ -49,6 +52,7 @@ export function subdivide(
   push(Infinity, root, new Float64Array(root.lo.length), 0);
   while (halved + widths.evaluations < effort.boxes) {
     const { box, bound, generation, costs: known } = heap.top()!;
+    if (bound <= widths.largest * CLOSE) break;
     const costs = generation < LASTING || generation % LASTING === 0 ? widths.of(box) : known;
     const variable = costliest(box, costs);
     if (variable < 0) break;

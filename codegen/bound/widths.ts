@@ -18,6 +18,8 @@ const LARGEST_RISE = 1e9;
 export class WidthCosts {
   /** Boxes evaluated so far. */
   evaluations = 0;
+  /** Largest bound of a small box so far: no subdivision comes far below it. */
+  largest = 0;
   private readonly proof: Proof;
   private readonly random = new Random(12345);
 
@@ -44,7 +46,9 @@ export class WidthCosts {
       const small = this.small(box);
       return { small, bound: this.bound(small) };
     });
-    return tried.reduce((most, other) => (other.bound > most.bound ? other : most));
+    const place = tried.reduce((most, other) => (other.bound > most.bound ? other : most));
+    this.largest = Math.max(this.largest, place.bound);
+    return place;
   }
 
   private bound(box: Box): number {

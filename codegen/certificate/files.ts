@@ -1,7 +1,7 @@
 import type { GroupProof } from '../bound/certify.ts';
 import type { Budget } from '../choose/budget.ts';
 import type { Trial } from '../choose/choose.ts';
-import { describeVariant, judgeOf, type Task, type Variant } from '../choose/variant.ts';
+import { judgeOf, type Task, type Variant } from '../choose/variant.ts';
 import { codeSize } from '../cost/code-size.ts';
 import { emitDeclarations } from '../emit/declarations.ts';
 import { digest } from '../files/digest.ts';
@@ -30,28 +30,23 @@ export const FILES = {
 /** Lines that the anatomy names for each output. */
 const ANATOMY = 10;
 
-/** One sentence on the error of an output group, for doc blocks: figures are rounded up. */
-export function errorSentence(key: string, entry: Pick<ErrorEntry, 'certified' | 'observed'>): string {
-  return `Error ${key}: at most ${ceilTo3(entry.certified)} (certified over the domain), ${ceilTo3(entry.observed)} observed.`;
-}
-
 /** Everything that stands in the folder of a variant, as text by file name. */
 export async function variantFiles(
   task: Task,
   budget: Budget,
   { variant, observed, proofs }: Trial,
 ): Promise<ReadonlyMap<string, string>> {
-  const entries = observed.map((seen) => {
-    const proof = proofs.find((candidate) => candidate.group === seen.group)!;
-    return [ERROR_KEY_OF_GROUP[seen.group]!, errorEntry(seen, proof, budget)] as const;
-  });
-  const sentences = entries.map(([key, entry]) => errorSentence(key, entry));
-  const final = describeVariant(task, variant.lowered, sentences);
-  const certificate = await composeCertificate(task, final, Object.fromEntries(entries), proofs);
+  const errors = Object.fromEntries(
+    observed.map((seen) => {
+      const proof = proofs.find((candidate) => candidate.group === seen.group)!;
+      return [ERROR_KEY_OF_GROUP[seen.group]!, errorEntry(seen, proof, budget)] as const;
+    }),
+  );
+  const certificate = await composeCertificate(task, variant, errors, proofs);
   const worst = Object.fromEntries(observed.map((entry) => [entry.group, entry.worst]));
   return new Map([
-    [FILES.code, final.code],
-    [FILES.types, emitDeclarations(final.kernel, task.model.units)],
+    [FILES.code, variant.code],
+    [FILES.types, emitDeclarations(variant.kernel, task.model.units)],
     [FILES.certificate, json(certificate)],
     [FILES.worst, json(worst)],
   ]);
@@ -129,11 +124,4 @@ function errorEntry(observed: Observed, proof: GroupProof, budget: Budget): Erro
 
 function json(value: unknown): string {
   return `${JSON.stringify(value, null, 2)}\n`;
-}
-
-/** Three digits, rounded up. */
-function ceilTo3(x: number): string {
-  const short = Number(x.toPrecision(3));
-  const unit = 10 ** (Math.floor(Math.log10(x)) - 2);
-  return (short >= x ? short : short + unit).toPrecision(3);
 }

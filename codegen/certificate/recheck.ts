@@ -2,30 +2,44 @@ import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Finding } from '../../src/finding.ts';
 import { InputError } from '../../src/finding.ts';
-import { certify, PROOF_EFFORT } from '../bound/certify.ts';
+import { certify, type GroupProof, PROOF_EFFORT } from '../bound/certify.ts';
+import { remarksOf } from '../choose/remarks.ts';
 import { taskOf } from '../choose/task.ts';
-import { makeVariant, type Task, type Variant } from '../choose/variant.ts';
+import { describeVariant, makeVariant, type Task, type Variant } from '../choose/variant.ts';
 import { codeSize } from '../cost/code-size.ts';
 import { digest } from '../files/digest.ts';
 import { printFormula } from '../formula/text.ts';
+import type { Kernel } from '../kernel/kernel.ts';
 import { Judge } from '../observe/judge.ts';
 import { importKernel } from '../observe/module.ts';
 import type { Worst } from '../observe/observe.ts';
 import { compareKernel } from '../parse/compare.ts';
 import { parseKernel } from '../parse/parse.ts';
+import { toKernel } from '../parse/to-kernel.ts';
 import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
-import { anatomyOf, errorSentence, FILES } from './files.ts';
+import { anatomyOf, FILES } from './files.ts';
 import { outputsDigest } from './outputs-digest.ts';
 
+/** What a recheck found, and how long its proof took. */
+export interface Recheck {
+  readonly findings: readonly Finding[];
+  /** What was proven of the file's own lines; empty when they are not those of the model. */
+  readonly proofs: readonly GroupProof[];
+}
+
 /**
- * Checks the files of a variant against the model, from scratch: the kernel is lowered again and compared with what the
- * emitted text is read back to, its bounds proven again, its operations and sizes counted again, its outputs computed again, and the worst inputs replayed.
+ * Checks the files of a variant against the model, from scratch: the model is lowered again and the emitted text, read
+ * back into lines, compared with it; the error of the lines that stand in the file is proven again; operations and sizes
+ * are counted, outputs computed and the worst inputs replayed.
  *
  * @param folder the variant's folder
- * @returns what differs; empty when all is as the certificate says
+ * @param progress told the share of the proof that is done
  * @throws InputError when a file is missing or is no certificate
  */
-export async function recheck(folder: string): Promise<readonly Finding[]> {
+export async function recheck(
+  folder: string,
+  progress: (share: number) => void = () => {},
+): Promise<Recheck> {
   const certificate = parse<Certificate>(folder, FILES.certificate);
   const worst = parse<Record<string, readonly Worst[]>>(folder, FILES.worst);
   const code = read(folder, FILES.code);
@@ -34,21 +48,35 @@ export async function recheck(folder: string): Promise<readonly Finding[]> {
   );
   const source = join(folder, FILES.certificate);
   const task = taskOf({ model: certificate.model, domain: certificate.domain.name, error: allowed }, source);
-  const sentences = Object.entries(certificate.error).map(([key, entry]) => errorSentence(key, entry));
-  const expected = makeVariant(task, certificate.choices, sentences);
-  const differences = [
-    ...compareCode(folder, code, expected),
+  const expected = makeVariant(task, certificate.choices);
+  const file = join(folder, FILES.code);
+  const lines = compareLines(file, code, expected);
+  const cheap = [
+    ...lines,
     ...(await compareCertificate(folder, certificate, task, expected, code)),
     ...(await replay(folder, certificate, task, worst, code)),
   ];
-  // the proof speaks of the lines that the file was just found to have; of other lines there is nothing to prove
-  return differences.length > 0 ? differences : compareProof(folder, certificate, expected);
+  if (lines.some((finding) => finding.code !== 'parse.other-constant'))
+    return { findings: cheap, proofs: [] };
+  const kernel = toKernel(parseKernel(file, code), expected.kernel);
+  const proofs = certify({ ...expected.lowered, kernel }, PROOF_EFFORT, progress);
+  const remarks = remarksOf(kernel, certificate.error, proofs);
+  const text = describeVariant(task, expected.lowered, remarks).code;
+  const proven = compareProof(folder, certificate, kernel, proofs);
+  return {
+    findings: [...cheap, ...proven, ...(lines.length > 0 ? [] : compareText(file, code, text))],
+    proofs,
+  };
 }
 
-/** Proves the bounds again. */
-function compareProof(folder: string, certificate: Certificate, expected: Variant): readonly Finding[] {
-  const proofs = certify(expected.lowered, PROOF_EFFORT);
-  const anatomy = proofs.flatMap((proof) => anatomyOf(expected.kernel, proof));
+/** What was proven again beside what is stated. */
+function compareProof(
+  folder: string,
+  certificate: Certificate,
+  kernel: Kernel,
+  proofs: readonly GroupProof[],
+): readonly Finding[] {
+  const anatomy = proofs.flatMap((proof) => anatomyOf(kernel, proof));
   const bounds = proofs.flatMap(({ group, bound, limit, boxes, axes }) => {
     const stated = certificate.error[ERROR_KEY_OF_GROUP[group]!]!;
     const parts = [stated.radial, stated.along, stated.cross].map((part) => part?.certified ?? null);
@@ -62,15 +90,10 @@ function compareProof(folder: string, certificate: Certificate, expected: Varian
   return compareFacts(folder, [...bounds, ['anatomy', certificate.anatomy, anatomy]]);
 }
 
-/**
- * Reads the emitted text back into lines and compares them with the kernel that the model gives; where they agree, the
- * rest of the text (names, comments) must too.
- */
-function compareCode(folder: string, code: string, expected: Variant): readonly Finding[] {
-  const file = join(folder, FILES.code);
-  const differences = compareLines(file, code, expected);
-  if (differences.length > 0 || code === expected.code) return differences;
-  const [have, want] = [code.split('\n'), expected.code.split('\n')];
+/** The rest of a text whose lines are those of the model: names and comments. */
+function compareText(file: string, code: string, expected: string): readonly Finding[] {
+  if (code === expected) return [];
+  const [have, want] = [code.split('\n'), expected.split('\n')];
   const index = want.findIndex((line, k) => line !== have[k]);
   const line = index < 0 ? want.length : index;
   return [

@@ -4,7 +4,8 @@ import { arithmeticName, type Choices } from '../kernel/choices.ts';
 import { type Effort, FULL_EFFORT, type Observed, observe } from '../observe/observe.ts';
 import { type Budget, ERROR_KEYS } from './budget.ts';
 import { candidates } from './candidates.ts';
-import { judgeOf, makeVariant, type Task, type Variant } from './variant.ts';
+import { remarksOf } from './remarks.ts';
+import { describeVariant, judgeOf, makeVariant, type Task, type Variant } from './variant.ts';
 
 /** A short look that can only rule variants out: an error seen is an error. */
 const FIRST_LOOK: Effort = { points: 2000, places: 0, draws: 0, pool: 1, steps: 0, seed: 3 };
@@ -24,6 +25,8 @@ export interface Trial {
   /** Proven bounds by output group; empty for a variant that was ruled out before. */
   readonly proofs: readonly GroupProof[];
   readonly excesses: readonly Excess[];
+  /** How long the proofs took, s. */
+  readonly seconds: number;
 }
 
 /** Told what is being done, and the share of it from 0 to 1. */
@@ -44,25 +47,47 @@ export async function choose(task: Task, budget: Budget, progress: Progress): Pr
     const first = await look(task, variant, FIRST_LOOK, () => {});
     const early = [...(await sizeExcesses(variant, budget)), ...errorExcesses(first, budget)];
     if (early.length > 0) {
-      trials.push({ choices, variant, observed: first, proofs: [], excesses: early });
+      trials.push({ choices, variant, observed: first, proofs: [], excesses: early, seconds: 0 });
       continue;
     }
+    const start = performance.now();
     const proofs = certify(variant.lowered, PROOF_EFFORT, (share) =>
       progress(`${variantName(choices)}: proving`, share),
     );
+    const seconds = (performance.now() - start) / 1000;
     const beyond = boundExcesses(proofs, budget);
     if (beyond.length > 0) {
-      trials.push({ choices, variant, observed: first, proofs, excesses: beyond });
+      trials.push({ choices, variant, observed: first, proofs, excesses: beyond, seconds });
       continue;
     }
     const observed = await look(task, variant, FULL_EFFORT, (share) =>
       progress(`${variantName(choices)}: observing`, share),
     );
     requireObservedBelow(proofs, observed);
-    trials.push({ choices, variant, observed, proofs, excesses: [] });
-    return trials;
+    const final = described(task, variant, observed, proofs);
+    const large = await sizeExcesses(final, budget); // the remarks beside the lines count in the size of the file
+    trials.push({ choices, variant: final, observed, proofs, excesses: large, seconds });
+    if (large.length === 0) return trials;
   }
   return trials;
+}
+
+/** A variant with remarks on its errors in its text. */
+function described(
+  task: Task,
+  variant: Variant,
+  observed: readonly Observed[],
+  proofs: readonly GroupProof[],
+): Variant {
+  const errors = Object.fromEntries(
+    Object.entries(ERROR_KEYS).flatMap(([key, group]) => {
+      const proof = proofs.find((candidate) => candidate.group === group);
+      const seen = observed.find((candidate) => candidate.group === group);
+      if (proof === undefined || seen === undefined) return [];
+      return [[key, { certified: proof.bound, observed: seen.size }] as const];
+    }),
+  );
+  return describeVariant(task, variant.lowered, remarksOf(variant.kernel, errors, proofs));
 }
 
 /** Observes a variant's own code over the task's domain. */

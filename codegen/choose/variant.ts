@@ -29,13 +29,23 @@ export interface Variant {
   readonly stateBytes: number;
 }
 
-/** Lowers, emits and counts one variant. `errors` are the sentences on its error, for the doc block. */
-export function makeVariant(task: Task, choices: Choices, errors: readonly string[] = []): Variant {
-  return describeVariant(task, lower(task.formula, task.domain, choices), errors);
+/** What an emitted file says of its errors. */
+export interface Remarks {
+  /** Sentences on the errors, for the doc block. */
+  readonly errors: readonly string[];
+  /** What stands beside lines, by line. */
+  readonly notes: ReadonlyMap<number, string>;
+}
+
+const NO_REMARKS: Remarks = { errors: [], notes: new Map() };
+
+/** Lowers, emits and counts one variant. */
+export function makeVariant(task: Task, choices: Choices): Variant {
+  return describeVariant(task, lower(task.formula, task.domain, choices));
 }
 
 /** Emits and counts a lowered kernel. */
-export function describeVariant(task: Task, lowered: Lowered, errors: readonly string[]): Variant {
+export function describeVariant(task: Task, lowered: Lowered, remarks: Remarks = NO_REMARKS): Variant {
   const { kernel } = lowered;
   const code = emitCode(kernel, {
     title: task.model.title,
@@ -43,7 +53,7 @@ export function describeVariant(task: Task, lowered: Lowered, errors: readonly s
     formulaDigest: digest(printFormula(task.formula)),
     domainName: task.domainName,
     units: task.model.units,
-    errors,
+    ...remarks,
   });
   const wordBytes = stateType(kernel) === 'Float32Array' ? 4 : 8;
   return {

@@ -64,15 +64,19 @@ export function formatTrials(trials: readonly Trial[]): string {
       'state bytes',
       'error observed',
       'error certified',
+      'proof',
       'verdict',
     ],
-    trials.map(({ choices, variant, observed, proofs, excesses }) => [
+    trials.map(({ choices, variant, observed, proofs, excesses, seconds }) => [
       variantName(choices),
       variant.cost.tick.total,
       variant.cost.setup.total,
       variant.stateBytes,
       observed.map((entry) => `${entry.group} ${entry.size.toExponential(2)}`).join(', '),
       proofs.map((entry) => `${entry.group} ${entry.bound.toExponential(2)}`).join(', '),
+      proofs.length === 0
+        ? ''
+        : `${proofs.reduce((sum, { boxes }) => sum + boxes, 0)} boxes, ${seconds.toFixed(1)} s`,
       excesses.length === 0 ? 'fits' : excesses.map(formatExcess).join('; '),
     ]),
   );

@@ -21,7 +21,7 @@ export function emitCode(kernel: Kernel, claims: Claims): string {
     'export function setup(elements, state) {',
     ...(kernel.guard < 0 ? [] : [`  state[${kernel.guard}] = 0;`]),
     ...kernel.elements.flatMap((name) => readElement(kernel, name)),
-    ...assignments(kernel, 'setup'),
+    ...assignments(kernel, 'setup', claims.notes),
     ...kernel.state.map((line, slot) => `  state[${slot}] = ${kernel.lines[line]!.name};`),
     '  return 0;',
     '}',
@@ -33,7 +33,7 @@ export function emitCode(kernel: Kernel, claims: Claims): string {
     ...(kernel.guard < 0
       ? []
       : [`  if (!(${kernel.lines[kernel.state[kernel.guard]!]!.name} > 0)) return 1;`]),
-    ...assignments(kernel, 'tick'),
+    ...assignments(kernel, 'tick', claims.notes),
     ...kernel.outputs.map((output, index) => `  out[${index}] = ${operand(kernel.lines[output.line]!)};`),
     '  return 0;',
     '}',
@@ -80,12 +80,19 @@ function roundedInput(kernel: Kernel, input: number): Line | undefined {
   return kernel.lines.find((line) => line.operation === 'round' && line.args[0] === input);
 }
 
-function assignments(kernel: Kernel, stage: 'setup' | 'tick'): readonly string[] {
+function assignments(
+  kernel: Kernel,
+  stage: 'setup' | 'tick',
+  notes: ReadonlyMap<number, string>,
+): readonly string[] {
   const checked = (line: Line) =>
     line.operation === 'round' &&
     kernel.choices[stage] === 'f32' &&
     kernel.lines[line.args[0]!]!.operation === 'input';
-  return kernel.lines
-    .filter((line) => line.stage === stage && line.operation !== 'input' && !checked(line))
-    .map((line) => `  const ${line.name} = ${expression(kernel, line)};`);
+  return [...kernel.lines.entries()]
+    .filter(([, line]) => line.stage === stage && line.operation !== 'input' && !checked(line))
+    .map(([k, line]) => {
+      const note = notes.get(k);
+      return `  const ${line.name} = ${expression(kernel, line)};${note === undefined ? '' : ` // ${note}`}`;
+    });
 }

@@ -14,6 +14,8 @@ export interface Claims {
   readonly units: Readonly<Record<string, string>>;
   /** One sentence a group of outputs on its error; empty while a kernel is still being tried. */
   readonly errors: readonly string[];
+  /** What is known of lines, by line: stands beside them. */
+  readonly notes: ReadonlyMap<number, string>;
 }
 
 /** Doc blocks of an emitted file. */
@@ -35,6 +37,11 @@ export function documentation(kernel: Kernel, claims: Claims): Documentation {
       `Model ${kernel.model}: ${claims.source}; formula sha256 ${claims.formulaDigest}.`,
       `Domain ${claims.domainName}. Choices: ${describeChoices(kernel)}.`,
       ...claims.errors,
+      ...(claims.notes.size === 0
+        ? []
+        : [
+            'Beside each line: the range of its value over the domain, and its share of the certified error.',
+          ]),
       '',
       'Not certified for safety of life. The interface documents, local rules and licensed practice decide.',
     ]),

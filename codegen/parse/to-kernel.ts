@@ -9,19 +9,19 @@ import type { ParsedArgument, ParsedKernel } from './parsed.ts';
  * file; numbers, names and nodes of the lines, and all that no file says, are those of the kernel that it equals.
  *
  * @param parsed what the file says
- * @param kernel a kernel without any difference from it
- * @throws InputError when there is a difference: ask compareKernel first
+ * @param kernel a kernel from which it differs in no more than constants
+ * @throws InputError when there is another difference: ask compareKernel first
  */
 export function toKernel(parsed: ParsedKernel, kernel: Kernel): Kernel {
   const differences = compareKernel(parsed, kernel, 'kernel.js');
-  if (differences.length > 0) throw new InputError(...differences);
+  if (differences.some(({ code }) => code !== 'parse.other-constant')) throw new InputError(...differences);
   const pairs = pairLines(groupsOfFile(parsed), groupsOfKernel(kernel));
   const lines: Line[] = [...kernel.lines];
   /** The line of an argument; a number of the file becomes the value of the constant that stands for it. */
   const lineOf = (arg: ParsedArgument, constant: number): number => {
     if ('line' in arg) return pairs.get(arg.line)!;
-    lines[constant] = { ...lines[constant]!, value: arg.literal };
-    return constant;
+    if (Object.is(lines[constant]!.value, arg.literal)) return constant;
+    return lines.push({ ...lines[constant]!, value: arg.literal }) - 1; // other readers keep the constant as it is
   };
   for (const [number, paired] of pairs) {
     const { operation, args, format, stage } = parsed.lines[number]!;

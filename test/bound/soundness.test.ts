@@ -19,7 +19,7 @@ describe.each(SUBJECTS)('$name', ({ lowered, task }) => {
 
   test('error <= bound at the point <= bound over the domain, at random points and ends of ranges', async () => {
     const certified = subdivide(proof, { boxes: 3000 }).bound;
-    const judge = await judgeOf(task, describeVariant(task, lowered, []));
+    const judge = await judgeOf(task, describeVariant(task, lowered));
     const points = new Points(task.domain, names, new Random(61));
     let nearest = 0;
     for (let k = 0; k < 3000; k++) {

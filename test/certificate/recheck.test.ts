@@ -24,37 +24,45 @@ function edit(name: string, change: (text: string) => string): void {
 
 describe('recheck names what was changed', () => {
   test('nothing in an untouched folder', async () => {
-    expect(await recheck(folder)).toEqual([]);
+    const { findings, proofs } = await recheck(folder);
+    expect(findings).toEqual([]);
+    expect(proofs.map((proof) => proof.group)).toEqual(['position']);
   });
 
   test('a coefficient changed by one unit in its last place, with its line', async () => {
     edit('kernel.js', (text) => text.replace('0.041666666666666664', '0.04166666666666667'));
-    const findings = await recheck(folder);
+    const { findings, proofs } = await recheck(folder);
     const line =
       readFileSync(join(source, 'kernel.js'), 'utf8')
         .split('\n')
         .findIndex((text) => text.includes('0.041666666666666664')) + 1;
     expect(findings[0]).toMatchObject({ code: 'parse.other-constant', place: { line } });
     expect(findings.map((finding) => finding.what).join()).toContain('digest.kernel');
+    const stated = JSON.parse(readFileSync(join(source, 'certificate.json'), 'utf8')) as {
+      error: { position_m: { certified: number } };
+    };
+    // the bound is that of the file's own coefficient
+    expect(proofs[0]!.bound).not.toBe(stated.error.position_m.certified);
+    expect(proofs[0]!.bound).toBeLessThan(2 * stated.error.position_m.certified);
   });
 
   test('a changed comment, though it computes the same', async () => {
     edit('kernel.js', (text) =>
       text.replace('Not certified for safety of life', 'Certified for safety of life'),
     );
-    expect((await recheck(folder))[0]).toMatchObject({ code: 'recheck.code' });
+    expect((await recheck(folder)).findings[0]).toMatchObject({ code: 'recheck.code' });
   });
 
   test('a line that the emitted form does not know', async () => {
     edit('kernel.js', (text) => text.replace('  return 0;', '  Math.random();\n  return 0;'));
-    await expect(recheck(folder)).resolves.toContainEqual(
-      expect.objectContaining({ code: expect.stringMatching(/^parse\./) }),
-    );
+    const { findings, proofs } = await recheck(folder);
+    expect(findings).toContainEqual(expect.objectContaining({ code: expect.stringMatching(/^parse\./) }));
+    expect(proofs).toEqual([]); // of other lines there is nothing to prove
   });
 
   test('a smaller observed error', async () => {
     edit('certificate.json', (text) => text.replace(/"observed": [^,]+/, '"observed": 1e-9'));
-    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain(
+    expect((await recheck(folder)).findings.map((finding) => finding.what).join()).toContain(
       'the observed error of position',
     );
   });
@@ -63,17 +71,17 @@ describe('recheck names what was changed', () => {
     edit('certificate.json', (text) =>
       text.replace(/"certified": ([^,]+)/, (_, value) => `"certified": ${Number(value) * 0.9985}`),
     );
-    const findings = await recheck(folder);
+    const { findings } = await recheck(folder);
     expect(findings).toHaveLength(1);
     expect(findings[0]!.what).toMatch(
-      /^position: certified is stated as 2\.65\d*e-7 and found to be 2\.65\d*e-7/,
+      /^position: certified is stated as 2\.\d*e-7 and found to be 2\.\d*e-7/,
     );
   });
 
   test('a smaller certified error, in the doc block too', async () => {
     edit('certificate.json', (text) => text.replace(/"certified": [^,]+/, '"certified": 2.1e-7'));
     edit('kernel.js', (text) => text.replace('at most 2.66e-7', 'at most 2.10e-7'));
-    expect(await recheck(folder)).not.toEqual([]);
+    expect((await recheck(folder)).findings).not.toEqual([]);
   });
 
   test.each([
@@ -84,12 +92,12 @@ describe('recheck names what was changed', () => {
     ['domain.ranges', /"max": 5160/, '"max": 5161'],
   ])('%s', async (name, pattern, text) => {
     edit('certificate.json', (old) => old.replace(pattern, text));
-    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain(name);
+    expect((await recheck(folder)).findings.map((finding) => finding.what).join()).toContain(name);
   });
 
   test('a worst input that was made harmless', async () => {
     edit('worst.json', (text) => text.replace(/"t": -?[\d.e-]+/, '"t": 0'));
-    expect((await recheck(folder)).map((finding) => finding.what).join()).toContain(
+    expect((await recheck(folder)).findings.map((finding) => finding.what).join()).toContain(
       'worst input 0 of position',
     );
   });

@@ -16,6 +16,7 @@ function emit(kernel: Kernel): string {
     domainName: 'random',
     units: {},
     errors: [],
+    notes: new Map(),
   });
 }
 
