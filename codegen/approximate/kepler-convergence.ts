@@ -67,8 +67,8 @@ export class KeplerConvergence {
     const far = size / (1 - e.hi * (1 + 2 * this.room));
     const way = size / this.slope(M, e, { lo: exact.lo - far, hi: exact.hi + far }).lo;
     return {
-      lo: Math.max(-way, interval.down(guess.lo - exact.hi)) * SLACK,
-      hi: Math.min(way, interval.up(guess.hi - exact.lo)) * SLACK,
+      lo: outward(Math.max(-way, interval.down(guess.lo - exact.hi)), -1),
+      hi: outward(Math.min(way, interval.up(guess.hi - exact.lo)), 1),
     };
   }
 
@@ -176,6 +176,11 @@ export class KeplerConvergence {
 
 function middle({ lo, hi }: Bounds): Bounds {
   return { lo: (lo + hi) / 2, hi: (lo + hi) / 2 };
+}
+
+/** A number moved down or up by the room for rounding. */
+function outward(x: number, side: -1 | 1): number {
+  return x + side * Math.abs(x) * (SLACK - 1);
 }
 
 function largest({ lo, hi }: Bounds): number {

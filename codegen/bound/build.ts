@@ -170,21 +170,19 @@ export class Builder {
         };
       }
       if (turn.anomaly !== undefined) {
-        const { E, e, root, sine } = turn.anomaly;
+        const { E, e, root } = turn.anomaly;
         const leaves = new Map<Node, number>([
           [E.cos, this.leaf(this.ownTurn(E), 'value', E.cos)],
           [E.sin, this.leaf(this.ownTurn(E), 'sine', E.sin)],
           [e, this.leaf(this.real(e, stage), 'value', e)],
-          [root, this.leaf(this.unrounded(root), 'value', root)],
+          [root, this.leaf(this.real(root, stage), 'value', root)],
         ]);
-        const lines = [turn.cos, this.lowered.graph.make('mul', root, sine)].map((node) =>
-          this.loose(node, stage, leaves),
-        );
+        const lines = [turn.cos, turn.sin].map((node) => this.loose(node, stage, leaves));
         return {
           kind: 'anomaly',
           turn: this.ownTurn(E),
-          e: this.unrounded(e),
-          root: this.unrounded(root),
+          e: this.real(e, stage),
+          root: this.real(root, stage),
           lines: lines as unknown as [number, number],
           line,
         };

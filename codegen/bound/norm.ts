@@ -66,7 +66,8 @@ function makeFaces(): readonly Face[] {
   for (const [i, a] of list.entries()) {
     for (const [j, b] of list.entries()) {
       for (const [k, c] of list.entries()) {
-        const upper = dot([a[0] + b[0] + c[0], a[1] + b[1] + c[1], a[2] + b[2] + c[2]], [0.3, 0.5, 0.8]) > 0;
+        const upper =
+          dot([a[0] + b[0] + c[0], a[1] + b[1] + c[1], a[2] + b[2] + c[2]], [0.31, 0.5, 0.83]) > 0;
         if (i < j && j < k && near(a, b) && near(b, c) && near(a, c) && upper) made.push(face(a, b, c, 0));
       }
     }

@@ -4,6 +4,7 @@ import { subdivide } from '../../codegen/bound/search.ts';
 import { describeVariant, judgeOf } from '../../codegen/choose/variant.ts';
 import { Random } from '../../codegen/numbers/random.ts';
 import { Points } from '../../codegen/observe/points.ts';
+import { uncovered } from './battery/coverage.ts';
 import { runLines, subject } from './lines.ts';
 
 const SUBJECTS = [
@@ -31,6 +32,10 @@ describe.each(SUBJECTS)('$name', ({ lowered, task }) => {
       nearest = Math.max(nearest, error / bound);
     }
     expect(nearest).toBeGreaterThan(0.2); // roundings of many lines seldom add up
+  });
+
+  test('every line that rounds on the way to the outputs has its part in the proof', () => {
+    expect(uncovered(lowered.kernel, proof.tape, 'position')).toEqual([]);
   });
 
   test('a box bounds its halves, and more boxes never loosen the bound', () => {

@@ -1,0 +1,167 @@
+import type { Fault } from '../faulty.ts';
+
+/** Faults of adjoints and of the error vector. */
+export const ADJOINTS: readonly Fault[] = [
+  {
+    name: 'one factor without adjoint',
+    file: 'bound/backward.ts',
+    find: 'return this.real(k, b, lo[a]!, hi[a]!);',
+    replace: 'return;',
+  },
+  {
+    name: 'a subtrahend without adjoint',
+    file: 'bound/backward.ts',
+    find: 'return this.real(k, b, -1, -1);',
+    replace: 'return;',
+  },
+  {
+    name: 'the square counted once',
+    file: 'bound/backward.ts',
+    find: 'if (a === b) return this.real(k, a, 2 * lo[a]!, 2 * hi[a]!);',
+    replace: 'if (a === b) return this.real(k, a, lo[a]!, hi[a]!);',
+  },
+  {
+    name: 'the divisor without sign',
+    file: 'bound/backward.ts',
+    find: 'this.real(k, b, -Math.max(...ends) - room, -Math.min(...ends) + room);',
+    replace: 'this.real(k, b, Math.min(...ends) - room, Math.max(...ends) + room);',
+  },
+  {
+    name: 'the slope of a root halved',
+    file: 'bound/backward.ts',
+    find: '[2 * lo[k]!, 2 * hi[k]!]',
+    replace: '[4 * lo[k]!, 4 * hi[k]!]',
+  },
+  {
+    name: 'radii of adjoints lost',
+    file: 'bound/backward.ts',
+    find: 'Math.abs(m) * half + r * size +',
+    replace: 'r * size +',
+  },
+  {
+    name: "Kepler's slope with the wrong sign",
+    file: 'bound/backward.ts',
+    find: 'interval.sub(w, SLOPE, SLOPE, TANGENTIAL);',
+    replace: 'interval.add(w, SLOPE, SLOPE, TANGENTIAL);',
+  },
+  {
+    name: 'the slope of M without denominator',
+    file: 'bound/backward.ts',
+    find: 'for (const register of [TANGENTIAL, RADIAL, SIN])',
+    replace: 'for (const register of [RADIAL, SIN])',
+  },
+  {
+    name: 'the slope of e with a factor e',
+    file: 'bound/backward.ts',
+    find: 'this.real(k, e, w.lo[SIN]!, w.hi[SIN]!);',
+    replace: 'this.real(k, e, w.lo[RADIAL]!, w.hi[RADIAL]!);',
+  },
+  {
+    name: 'radial and tangential errors of M swapped',
+    file: 'bound/backward.ts',
+    find: 'this.spread(mid, rad, k, mid, rad, turn, w.lo[RADIAL]!, w.hi[RADIAL]!);',
+    replace: 'this.spread(mid, rad, k, mid, rad, turn, w.lo[TANGENTIAL]!, w.hi[TANGENTIAL]!);',
+  },
+  {
+    name: 'the true anomaly without e',
+    file: 'bound/backward.ts',
+    find: 'pass(true, e, false, 1, [D, S]);',
+    replace: '',
+  },
+  {
+    name: 'the true anomaly without the root',
+    file: 'bound/backward.ts',
+    find: 'pass(true, root, false, 1, [C, S]);',
+    replace: '',
+  },
+  {
+    name: 'an argument of latitude that is not along',
+    file: 'bound/backward.ts',
+    find: 'put(orbit.u, 1, 1, [r], true);',
+    replace: '',
+  },
+  {
+    name: 'an inclination along instead of across',
+    file: 'bound/backward.ts',
+    find: 'put(orbit.i, 2, 1, [r, s], true);',
+    replace: 'put(orbit.i, 1, 1, [r, s], true);',
+  },
+  {
+    name: 'a node without its part across',
+    file: 'bound/backward.ts',
+    find: 'put(node.turn, 2, -1, [r, c, S], true);',
+    replace: '',
+  },
+  {
+    name: 'a rotation whose angle moves nothing',
+    file: 'bound/backward.ts',
+    find: 'this.seed(this.midT, this.radT, at + 1, lo[X]!, hi[X]!);',
+    replace: '',
+  },
+  {
+    name: 'the sine of a pair without its part along',
+    file: 'bound/backward.ts',
+    find: 'this.spread(midT, radT, k, mid, rad, sin, cl, ch);',
+    replace: '',
+  },
+  {
+    name: 'one product of turns passed on to one factor',
+    file: 'bound/backward.ts',
+    find: 'this.pass(k, entry.args[1]);',
+    replace: '',
+  },
+  {
+    name: 'entries of one line with opposite signs',
+    file: 'bound/error-vector.ts',
+    find: '(mid[k * count + i]! + (other < 0 ? 0 : mid[other]!)) * local',
+    replace: '(mid[k * count + i]! - (other < 0 ? 0 : mid[other]!)) * local',
+  },
+  {
+    name: 'the second entry of a line left out',
+    file: 'bound/error-vector.ts',
+    find: 'const twin = this.twins[k]!;',
+    replace: 'const twin = Math.min(-1, this.twins[k]!);',
+  },
+  {
+    name: 'sines of turns without errors',
+    file: 'bound/error-vector.ts',
+    find: 'this.collectComponent(k, b * grow, sine.lo[k]!, sine.hi[k]!, value.lo[k]!, value.hi[k]!);',
+    replace: '',
+  },
+  {
+    name: 'turns at unknown angles err along the radius alone',
+    file: 'bound/error-vector.ts',
+    find: 'this.pairs[at + 3 + i] = midT[j]! * local;',
+    replace: '',
+  },
+  {
+    name: 'radial and tangential parts of a cosine swapped',
+    file: 'bound/error-vector.ts',
+    find: '(mid[j]! * r + midT[j]! * t) * local',
+    replace: '(mid[j]! * t + midT[j]! * r) * local',
+  },
+  {
+    name: 'the width of turns without cost',
+    file: 'bound/error-vector.ts',
+    find: 'this.rest[i]! += spread * local;',
+    replace: '',
+  },
+  {
+    name: 'no rounding of the last rotation',
+    file: 'bound/error-vector.ts',
+    find: 'this.ball = this.rotationError();',
+    replace: '',
+  },
+  {
+    name: 'no distance of the faces of the net',
+    file: 'bound/norm.ts',
+    find: 'Math.max(at(corners[0]), at(corners[1]), at(corners[2])) / distance;',
+    replace: 'Math.max(at(corners[0]), at(corners[1]), at(corners[2]));',
+  },
+  {
+    name: 'faces of the net that are left out',
+    file: 'bound/norm.ts',
+    find: 'for (const face of faces) visit(face);',
+    replace: 'for (const face of faces.slice(1)) visit(face);',
+  },
+];

@@ -1,0 +1,173 @@
+import type { Fault } from '../faulty.ts';
+
+/** Faults of blocks, of what is built, and of the search. */
+export const BLOCKS_AND_SEARCH: readonly Fault[] = [
+  {
+    name: 'a polynomial without truncation',
+    file: 'bound/sine-block.ts',
+    find: 'return [of(lines.cos) + cos, of(lines.sin) + sin];',
+    replace: 'return [of(lines.cos) + 0 * cos, of(lines.sin) + 0 * sin];',
+  },
+  {
+    name: 'a remainder taken for exact',
+    file: 'bound/sine-block.ts',
+    find: 'return Math.abs(q) * (dyadic.toDoubleUp(size) + 2 ** -230) * (1 + 2 ** -50);',
+    replace: 'return 0 * Math.abs(q) * dyadic.toDoubleUp(size);',
+  },
+  {
+    name: 'only the last turn of an angle',
+    file: 'bound/sine-block.ts',
+    find: 'cells[place] = [Math.max(cos, oldCos), Math.max(sin, oldSin)];',
+    replace: 'cells[place] = [cos + 0 * oldCos, sin + 0 * oldSin];',
+  },
+  {
+    name: 'only the first cell of a small angle',
+    file: 'bound/sine-block.ts',
+    find: 'const last = Math.min(CELLS - 1, Math.floor((hi + radius) / width + 1e-9));',
+    replace: 'const last = first + 0 * hi;',
+  },
+  {
+    name: 'only the first cell of an angle',
+    file: 'bound/sine-block.ts',
+    find: 'const last = Math.floor(hi / width + 1e-9);',
+    replace: 'const last = Math.floor(lo / width - 1e-9) + 0 * hi;',
+  },
+  {
+    name: 'lines of a block at half their rounding',
+    file: 'bound/line-tape.ts',
+    find: 'if (local[k]! !== 0) sum += local[k]!',
+    replace: 'if (local[k]! !== 0) sum += 0.5 * local[k]!',
+  },
+  {
+    name: 'a polynomial with a sign lost',
+    file: 'bound/polynomial.ts',
+    find: 'return combine(a, b, dyadic.sub);',
+    replace: 'return combine(a, b, dyadic.add);',
+  },
+  {
+    name: 'half the rounding of a solver',
+    file: 'bound/solver-block.ts',
+    find: 'sum += local[k]! * (Math.abs(mid[k]!) + rad[k]!);',
+    replace: 'sum += 0.2 * local[k]! * (Math.abs(mid[k]!) + rad[k]!);',
+  },
+  {
+    name: "Newton's constant 1/4 instead of 1/2",
+    file: 'approximate/kepler-convergence.ts',
+    find: '(Math.max(0, size) * x * x) / (2 * slope)',
+    replace: '(Math.max(0, size) * x * x) / (4 * slope)',
+  },
+  {
+    name: 'the largest slope instead of the least',
+    file: 'approximate/kepler-convergence.ts',
+    find: 'const slope = this.slope(M, e, at).lo;',
+    replace: 'const slope = this.slope(M, e, at).hi;',
+  },
+  {
+    name: 'a starter without the width of its cell',
+    file: 'approximate/kepler-convergence.ts',
+    find: 'ways.reduce((sum, way, k) => sum + largest(this.gradient.derivative(node, k)) * way, 0) * SLACK',
+    replace: '0 * ways.length',
+  },
+  {
+    name: "Halley's step without the third derivative",
+    file: 'approximate/kepler-convergence.ts',
+    find: '(bend * bend) / (4 * slope) + third / 6)',
+    replace: '(bend * bend) / (4 * slope))',
+  },
+  {
+    name: 'a range over half a turn taken on one side',
+    file: 'approximate/kepler-cells.ts',
+    find: 'if (hi > Math.PI) return Math.max(most(lo, Math.PI), most(-Math.PI, hi - 2 * Math.PI));',
+    replace: 'if (hi > Math.PI) return most(lo, Math.PI);',
+  },
+  {
+    name: 'one eccentricity of a range',
+    file: 'approximate/kepler-cells.ts',
+    find: 'for (let j = from; j <= to; j++)',
+    replace: 'for (let j = from; j <= from; j++)',
+  },
+  {
+    name: 'no error of constants read',
+    file: 'bound/build.ts',
+    find: 'error: Math.abs(value - hi - lo) * (1 + 2 ** -50)',
+    replace: 'error: 0 * Math.abs(value - hi - lo)',
+  },
+  {
+    name: 'values of setup not rounded for the tick',
+    file: 'bound/build.ts',
+    find: 'if (this.blocks === null || format === this.formatOf(stage)) return own;',
+    replace: 'return own;',
+  },
+  {
+    name: 'turns of setup not rounded for the tick',
+    file: 'bound/build.ts',
+    find: 'if (this.blocks === null || this.formatOf(stageOf(turn.cos)) === this.formatOf(stage)) return own;',
+    replace: 'return own;',
+  },
+  {
+    name: 'lines of a true anomaly without rounding',
+    file: 'bound/build.ts',
+    find: "format: line < 0 || this.blocks === null ? 'exact' : this.formatOf(stage)",
+    replace: "format: 'exact'",
+  },
+  {
+    name: 'two radii taken for one',
+    file: 'bound/turns.ts',
+    find: 'if (R !== undefined && cofactor(second, turn.sin) === R) return { turn, R };',
+    replace: 'if (R !== undefined && cofactor(second, turn.sin) !== undefined) return { turn, R };',
+  },
+  {
+    name: 'sines of turns with the ranges of cosines',
+    file: 'bound/certify.ts',
+    find: 'note(entry.sinLine, sine, k);',
+    replace: 'note(entry.sinLine, value, k);',
+  },
+  {
+    name: 'the points of the smallest bounds',
+    file: 'bound/pointwise.ts',
+    find: 'tops.sort((a, b) => b.bound - a.bound);',
+    replace: 'tops.sort((a, b) => a.bound - b.bound);',
+  },
+  {
+    name: 'halves of a box with a gap',
+    file: 'bound/search.ts',
+    find: 'right.lo[variable] = cut;',
+    replace: 'right.lo[variable] = cut + (box.hi[variable]! - cut) / 8;',
+  },
+  {
+    name: 'one half of a box',
+    file: 'bound/search.ts',
+    find: 'for (const half of halves(box, variable))',
+    replace: 'for (const half of halves(box, variable).slice(1))',
+  },
+  {
+    name: 'the second largest bound',
+    file: 'bound/search.ts',
+    find: 'return { bound: heap.top()!.bound,',
+    replace: 'heap.pop();\n  return { bound: heap.top()!.bound,',
+  },
+  {
+    name: 'a heap out of order',
+    file: 'bound/search.ts',
+    find: 'items[right]!.bound > items[largest]!.bound',
+    replace: 'items[right]!.bound < items[largest]!.bound',
+  },
+  {
+    name: 'the last bound along an axis',
+    file: 'bound/search.ts',
+    find: 'most[k] = Math.max(most[k], axes[k]);',
+    replace: 'most[k] = axes[k];',
+  },
+  {
+    name: 'three quarters of the circle',
+    file: 'bound/proof.ts',
+    find: 'Array(cuts).fill(Math.PI + 1e-9)',
+    replace: 'Array(cuts).fill(Math.PI / 2)',
+  },
+  {
+    name: 'float32 inputs in the ranges of float64',
+    file: 'bound/proof.ts',
+    find: 'if (!float32) return [min, max];',
+    replace: 'if (float32) return [min, max];',
+  },
+];

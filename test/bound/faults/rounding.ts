@@ -1,0 +1,161 @@
+import type { Fault } from '../faulty.ts';
+
+/** Faults of local errors and ranges. */
+export const ROUNDING: readonly Fault[] = [
+  {
+    name: 'half of half a unit of float32',
+    file: 'bound/rounding.ts',
+    find: 'f32: 2 ** -24 }',
+    replace: 'f32: 2 ** -25 }',
+  },
+  {
+    name: 'half a unit of the binade below',
+    file: 'bound/rounding.ts',
+    find: 'Math.min(half, Math.max(half / 2, magnitude - power))',
+    replace: 'half / 2',
+  },
+  {
+    name: 'no rounding below normal numbers',
+    file: 'bound/rounding.ts',
+    find: 'f32: 2 ** -150 }',
+    replace: 'f32: 0 }',
+  },
+  {
+    name: 'exactness of one bit too many',
+    file: 'bound/rounding.ts',
+    find: 'unit * 2 ** (FRACTION[format] + 1)',
+    replace: 'unit * 2 ** (FRACTION[format] + 2)',
+  },
+  {
+    name: 'the grid of the larger end',
+    file: 'bound/rounding.ts',
+    find: 'lo > 0 ? lo : hi < 0 ? -hi : 0',
+    replace: 'lo > 0 ? hi : hi < 0 ? -lo : 0',
+  },
+  {
+    name: 'ranges not widened by errors',
+    file: 'bound/real-ranges.ts',
+    find: 'this.value.hi[k] = interval.up(this.value.hi[k]! + local);',
+    replace: '',
+  },
+  {
+    name: 'quotients and roots without rounding',
+    file: 'bound/real-ranges.ts',
+    find: "return format === 'exact' ? 0 : halfUnit(this.magnitude(k), format);",
+    replace: "return format === 'f32' ? 0 : halfUnit(this.magnitude(k), format as 'f64');",
+  },
+  {
+    name: 'half the rounding of products',
+    file: 'bound/real-ranges.ts',
+    find: 'LEAST[format] : halfUnit(this.magnitude(k), format);',
+    replace: 'LEAST[format] : halfUnit(this.magnitude(k), format) / 2;',
+  },
+  {
+    name: 'sums no larger off than the difference of operands',
+    file: 'bound/real-ranges.ts',
+    find: 'Math.min(halfUnit(this.magnitude(k), format), this.magnitude(a), this.magnitude(b))',
+    replace: 'Math.min(halfUnit(this.magnitude(k), format), Math.abs(this.magnitude(a) - this.magnitude(b)))',
+  },
+  {
+    name: 'products by any constant exact',
+    file: 'bound/real-ranges.ts',
+    find: 'return isPower(pointA) || isPower(pointB) ?',
+    replace: 'return pointA !== undefined || pointB !== undefined ?',
+  },
+  {
+    name: 'no rounding of inputs to float32',
+    file: 'bound/real-ranges.ts',
+    find: "exact ? 0 : halfUnit(this.magnitude(k), 'f32')",
+    replace: '0',
+  },
+  {
+    name: 'half the error of a product',
+    file: 'bound/real-ranges.ts',
+    find: 'this.magnitude(a) * E[b]! + this.magnitude(b) * E[a]!',
+    replace: 'this.magnitude(a) * E[b]!',
+  },
+  {
+    name: 'the error of a quotient not divided',
+    file: 'bound/real-ranges.ts',
+    find: '(E[a]! + this.magnitude(k) * E[b]!) / least',
+    replace: 'Math.min(1, least) * (E[a]! + this.magnitude(k) * E[b]!) * 0.1',
+  },
+  {
+    name: 'constants taken for exact',
+    file: 'bound/forward.ts',
+    find: 'this.finish(k, entry.error, 0);',
+    replace: 'this.finish(k, 0, 0);',
+  },
+  {
+    name: 'components without the deviation of their turn',
+    file: 'bound/forward.ts',
+    find: 'interval.up(this.work.hi[7]! + d)',
+    replace: 'interval.up(this.work.hi[7]!)',
+  },
+  {
+    name: 'the deviation of factors forgotten',
+    file: 'bound/forward.ts',
+    find: '(carried + this.localBoth[k]!) * SLACK',
+    replace: 'this.localBoth[k]! * 0.5',
+  },
+  {
+    name: 'rounded turns rounded to float64',
+    file: 'bound/forward.ts',
+    find: "const sin = halfUnit(Math.max(-this.sine.lo[of]!, this.sine.hi[of]!), 'f32');",
+    replace: "const sin = halfUnit(Math.max(-this.sine.lo[of]!, this.sine.hi[of]!), 'f64');",
+  },
+  {
+    name: 'one product of a turn without rounding',
+    file: 'bound/forward.ts',
+    find: 'return first + second + halfUnit(size, format);',
+    replace: 'return second + halfUnit(size, format);',
+  },
+  {
+    name: 'the angle of a product without the error of one factor',
+    file: 'bound/forward.ts',
+    find: 'this.error[k] = (this.error[a]! + this.error[b]!) * SLACK;',
+    replace: 'this.error[k] = this.error[b]! * SLACK;',
+  },
+  {
+    name: 'the offset of E taken at the end of e',
+    file: 'bound/forward.ts',
+    find: 'interval.set(w, 1, 0, most);',
+    replace: 'interval.set(w, 1, most, most);',
+  },
+  {
+    name: 'a solver without its error',
+    file: 'bound/forward.ts',
+    find: 'entry.errors?.offset(span, { lo: w.lo[1]!, hi: most }) ?? 0',
+    replace: '0',
+  },
+  {
+    name: 'lines without rounding in their ranges',
+    file: 'bound/line-ranges.ts',
+    find: 'halfUnit(size, line.format)',
+    replace: 'halfUnit(size, line.format) / 1e9',
+  },
+  {
+    name: 'a sum with the rounding of one product',
+    file: 'bound/rotation-rounding.ts',
+    find: 'halfUnit(a, format) + halfUnit(b, format)',
+    replace: 'halfUnit(b, format)',
+  },
+  {
+    name: 'one output of a rotation',
+    file: 'bound/rotation-rounding.ts',
+    find: 'first * first + second * second',
+    replace: 'second * second',
+  },
+  {
+    name: 'products of turns without their sum',
+    file: 'bound/product-rounding.ts',
+    find: 'return largest + sum;',
+    replace: 'return largest;',
+  },
+  {
+    name: 'the sine of a product as its cosine',
+    file: 'bound/product-rounding.ts',
+    find: 'this.cells[CELLS.angle - 1 - folded(cell)]!',
+    replace: 'this.cells[folded(cell)]!',
+  },
+];
