@@ -137,10 +137,18 @@ function cutTurns(tape: Tape, forward: Forward): readonly number[] {
   for (const k of [...read].sort((a, b) => a - b)) {
     const entry = tape.entries[k]!;
     const several =
-      entry.kind === 'turn' ? wide(k) === 1 && tape.entries[entry.angle]!.kind !== 'input' : wide(k) > 1;
+      entry.kind === 'turn' ? wide(k) === 1 && !isInput(tape, forward, entry.angle) : wide(k) > 1;
     if (several) cuts.push(k);
   }
   return cuts;
+}
+
+/** Whether an entry is an input, or the rounding of one that stays within a turn: splitting the input splits it. */
+function isInput(tape: Tape, forward: Forward, k: number): boolean {
+  const entry = tape.entries[k]!;
+  if (entry.kind === 'input') return true;
+  const within = forward.value.hi[k]! - forward.value.lo[k]! <= 2 * Math.PI;
+  return entry.kind === 'round' && within && tape.entries[entry.args[0]!]!.kind === 'input';
 }
 
 /** The input whose angle goes into a turn as it is: given the turn's own angle and the other inputs, it says no more. */
@@ -174,10 +182,10 @@ function rootBox(lowered: Lowered, names: readonly string[], cuts: number): Box 
   };
 }
 
-/** A float32 stage checks the rounded value against the rounded range: what passes lies in the range or a unit beside it. */
+/** A float32 stage checks the rounded value against the rounded range: what passes lies in the range or half a unit beside it. */
 function widened(domain: Domain, name: string, float32: boolean): readonly [number, number] {
   const { min, max } = domain[name]!;
   if (!float32) return [min, max];
-  const room = (x: number) => Math.abs(Math.fround(x)) * 2 ** -23 + 2 ** -149;
+  const room = (x: number) => Math.abs(Math.fround(x)) * 2 ** -24 + 2 ** -149;
   return [Math.fround(min) - room(min), Math.fround(max) + room(max)];
 }

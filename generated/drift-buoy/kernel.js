@@ -4,7 +4,7 @@
  * GPS broadcast ephemeris (legacy navigation message), Earth-fixed position and clock.
  * Model gps-lnav: IS-GPS-200, Table 20-IV and 20.3.3.3.3; formula sha256 5f836c5a9091cf697931b1ab8c6fb4ce7d2fbf92e8c01aaf6eb3273e2c4ce794.
  * Domain flown. Choices: arithmetic f64-setup-f32-tick, Kepler starter secondOrder, corrector newton, cap 1.
- * Error position_m: at most 38.0 (certified over the domain), 22.2 observed.
+ * Error position_m: at most 38.8 (certified over the domain), 22.2 observed.
  * Beside each line: the range of its value over the domain, and its share of the certified error.
  *
  * Not certified for safety of life. The interface documents, local rules and licensed practice decide.
@@ -73,8 +73,8 @@ export function setup(elements, state) {
   const toe = elements.toe;
   if (!(toe >= 0 && toe <= 604784)) return toe - toe === 0 ? 1 : 3;
   const A = sqrtA * sqrtA; // [26520000, 26630000]
-  const A32 = fround(A); // [26520000, 26630000], 2.6 %
-  const e32 = fround(e); // [-9.314e-10, 0.03001], 0.1 %
+  const A32 = fround(A); // [26520000, 26630000], 2.4 %
+  const e32 = fround(e); // [-9.314e-10, 0.03001]
   const v1 = M0 * 0.6366197723675814; // [-2.001, 2.001]
   const v2 = v1 + 0.5; // [-1.501, 2.501]
   const v3 = Math.floor(v2); // [-2, 2]
@@ -132,13 +132,13 @@ export function setup(elements, state) {
   const v55 = -v54; // [-5.001, 9.001]
   const v56 = v7 < 0.5 ? v54 : v55; // [-9.001, 9.001]
   const v57 = v48 * v56; // [-1.001, 1.001]
-  const v58 = fround(v57); // [-1.001, 1.001], 2.7 %
+  const v58 = fround(v57); // [-1.001, 1.001], 2.9 %
   const v59 = A * A; // [703400000000000, 709000000000000]
   const v60 = v59 * A; // [1.865e+22, 1.888e+22]
   const v61 = 398600500000000 / v60; // [2.111e-8, 2.137e-8]
   const n0 = Math.sqrt(v61); // [0.0001453, 0.0001462]
   const n = n0 + deltaN; // [0.0001453, 0.0001462]
-  const n32 = fround(n); // [0.0001453, 0.0001462], 0.8 %
+  const n32 = fround(n); // [0.0001453, 0.0001462], 0.6 %
   const v62 = v7 < 0.5 ? v47 : v30; // [-47.63, 47.63]
   const v63 = v62 * v54; // [-1.001, 1.001]
   const v64 = fround(v63); // [-1.001, 1.001]
@@ -270,9 +270,9 @@ export function setup(elements, state) {
   const v182 = -v181; // [-33.01, 37.01]
   const v183 = v134 < 0.5 ? v181 : v182; // [-37.01, 37.01]
   const v184 = v175 * v183; // [-1.001, 1.001]
-  const v185 = fround(v184); // [-1.001, 1.001], 1.8 %
+  const v185 = fround(v184); // [-1.001, 1.001], 2.1 %
   const v186 = OmegaDot - 0.000072921151467; // [-0.00007294, -0.00007292]
-  const v187 = fround(v186); // [-0.00007294, -0.00007292], 0.4 %
+  const v187 = fround(v186); // [-0.00007294, -0.00007292], 0.2 %
   const v188 = v134 < 0.5 ? v174 : v157; // [-220300000000000, 219700000000000]
   const v189 = v188 * v181; // [-1.001, 1.001]
   const v190 = fround(v189); // [-1.001, 1.001]
@@ -295,7 +295,7 @@ export function setup(elements, state) {
   const v207 = -0.5 + v206; // [-0.4675, -0.4577]
   const v208 = v191 * v207; // [-0.4863, -0.3708]
   const v209 = 1 + v208; // [0.5233, 0.6217]
-  const v210 = fround(v209); // [0.5233, 0.6217], 2.2 %
+  const v210 = fround(v209); // [0.5233, 0.6217], 1.2 %
   const IDOT32 = fround(IDOT); // [-2.926e-9, 2.926e-9]
   const Cis32 = fround(Cis); // [-0.00006104, 0.00006104]
   const Cic32 = fround(Cic); // [-0.00006104, 0.00006104]
@@ -377,7 +377,7 @@ export function position(t, state, out) {
   const v210 = state[18];
   const v230 = state[19];
   if (!(n32 > 0)) return 1;
-  const v231 = fround(n32 * t32); // [-1.053, 1.053], 1.1 %
+  const v231 = fround(n32 * t32); // [-1.053, 1.053], 1.4 %
   const v232 = fround(v231 * v231); // [-5.961e-8, 1.108]
   const v233 = fround(v232 * -2.755731998149713e-7); // [-3.053e-7, 3.064e-14]
   const v234 = fround(0.000024801587642286904 + v233); // [0.00002449, 0.00002481]
@@ -402,7 +402,7 @@ export function position(t, state, out) {
   const v253 = fround(v244 * v252); // [-0.1944, 0.1944]
   const v254 = fround(v231 + v253); // [-0.8687, 0.8687]
   const v255 = fround(v64 * v254); // [-0.8687, 0.8687]
-  const cosM = fround(v243 - v255); // [-1.001, 1.001], 9.0 %
+  const cosM = fround(v243 - v255); // [-1.001, 1.001], 9.1 %
   const v256 = fround(v64 * v242); // [-1.001, 1.001]
   const v257 = fround(v58 * v254); // [-0.8687, 0.8687]
   const sinM = fround(v256 + v257); // [-1.001, 1.001]
@@ -432,38 +432,38 @@ export function position(t, state, out) {
   const v281 = fround(v280 * 0.0416666679084301); // [-3.032e-12, 0.00003751]
   const v282 = fround(-0.5 + v281); // [-0.5001, -0.4999]
   const v283 = fround(v280 * v282); // [-0.0004501, 2.911e-11]
-  const v284 = fround(1 + v283); // [0.9995, 1.001], 1.8 %
+  const v284 = fround(1 + v283); // [0.9995, 1.001], 1.9 %
   const v285 = fround(cosM * v284); // [-1.001, 1.001]
   const v286 = fround(v279 * v280); // [-0.00002701, 0.00002701]
   const v287 = fround(v286 * -0.1666666716337204); // [-0.000004501, 0.000004501]
   const v288 = fround(v279 + v287); // [-0.03, 0.03]
   const v289 = fround(sinM * v288); // [-0.03, 0.03]
-  const cosE = fround(v285 - v289); // [-1.001, 1.001], 7.9 %
+  const cosE = fround(v285 - v289); // [-1.001, 1.001], 7.7 %
   const v290 = fround(e32 * cosE); // [-0.03001, 0.03001]
   const v291 = fround(1 - v290); // [0.9699, 1.031]
-  const v292 = fround(A32 * v291); // [25720000, 27430000], 2.5 %
+  const v292 = fround(A32 * v291); // [25720000, 27430000], 2.4 %
   const v293 = fround(sinM * v284); // [-1.001, 1.001]
   const v294 = fround(cosM * v288); // [-0.03, 0.03]
   const sinE = fround(v293 + v294); // [-1.001, 1.001]
   const v295 = fround(v68 * sinE); // [-1.001, 1.001]
-  const v296 = fround(1 / v291); // [0.9708, 1.031], 2.1 %
+  const v296 = fround(1 / v291); // [0.9708, 1.031], 3.8 %
   const sinnu = fround(v295 * v296); // [-1.031, 1.031]
   const v297 = fround(sinnu * cosomega32); // [-1.031, 1.031]
-  const v298 = fround(cosE - e32); // [-1.031, 1.001], 4.0 %
-  const cosnu = fround(v298 * v296); // [-1.001, 1.001], 4.1 %
+  const v298 = fround(cosE - e32); // [-1.031, 1.001], 3.8 %
+  const cosnu = fround(v298 * v296); // [-1.001, 1.001], 3.8 %
   const v299 = fround(cosnu * sinomega32); // [-1.001, 1.001]
   const sinphi = fround(v297 + v299); // [-1.001, 1.001]
   const v300 = fround(sinphi + sinphi); // [-2.001, 2.001]
   const v301 = fround(cosnu * cosomega32); // [-1.001, 1.001]
   const v302 = fround(sinnu * sinomega32); // [-1.031, 1.031]
-  const cosphi = fround(v301 - v302); // [-1.001, 1.001], 5.6 %
+  const cosphi = fround(v301 - v302); // [-1.001, 1.001], 5.8 %
   const sin2phi = fround(v300 * cosphi); // [-2.001, 2.001]
   const v303 = fround(Crs32 * sin2phi); // [-2049, 2049]
   const v304 = fround(v300 * sinphi); // [-2.001, 2.001]
   const cos2phi = fround(1 - v304); // [-1.001, 3.001]
   const v305 = fround(Crc32 * cos2phi); // [-3073, 3072]
   const v306 = fround(v303 + v305); // [-5121, 5120]
-  const r = fround(v292 + v306); // [25720000, 27430000], 2.5 %
+  const r = fround(v292 + v306); // [25720000, 27430000], 2.4 %
   const v307 = fround(Cus32 * sin2phi); // [-0.0001221, 0.0001221]
   const v308 = fround(Cuc32 * cos2phi); // [-0.0001832, 0.0001832]
   const v309 = fround(v307 + v308); // [-0.0003052, 0.0003052]
@@ -475,9 +475,9 @@ export function position(t, state, out) {
   const v315 = fround(v314 * -0.1666666716337204); // [-4.737e-12, 4.737e-12]
   const v316 = fround(v309 + v315); // [-0.0003052, 0.0003052]
   const v317 = fround(sinphi * v316); // [-0.0003052, 0.0003052]
-  const cosu = fround(v313 - v317); // [-1.001, 1.001], 5.5 %
-  const xOrbit = fround(r * cosu); // [-27430000, 27430000], 1.0 %
-  const v318 = fround(v187 * t32); // [-0.5252, 0.5252], 0.5 %
+  const cosu = fround(v313 - v317); // [-1.001, 1.001], 5.7 %
+  const xOrbit = fround(r * cosu); // [-27430000, 27430000], 1.6 %
+  const v318 = fround(v187 * t32); // [-0.5252, 0.5252], 0.6 %
   const v319 = fround(v318 * v318); // [-1.491e-8, 0.2758]
   const v320 = fround(v319 * 0.000024801587642286904); // [-5.97e-13, 0.000006839]
   const v321 = fround(-0.0013888889225199819 + v320); // [-0.001389, -0.001382]
@@ -486,7 +486,7 @@ export function position(t, state, out) {
   const v324 = fround(v319 * v323); // [-1.087e-9, 0.01149]
   const v325 = fround(-0.5 + v324); // [-0.5001, -0.4885]
   const v326 = fround(v319 * v325); // [-0.1379, 1.491e-8]
-  const v327 = fround(1 + v326); // [0.8652, 1.001], 2.5 %
+  const v327 = fround(1 + v326); // [0.8652, 1.001], 3.0 %
   const v328 = fround(v185 * v327); // [-1.001, 1.001]
   const v329 = fround(v318 * v319); // [-0.1448, 0.1448]
   const v330 = fround(v319 * 0.0000027557318844628753); // [-6.949e-14, 7.599e-7]
@@ -498,12 +498,12 @@ export function position(t, state, out) {
   const v336 = fround(v329 * v335); // [-0.02414, 0.02414]
   const v337 = fround(v318 + v336); // [-0.5014, 0.5014]
   const v338 = fround(v190 * v337); // [-0.5014, 0.5014]
-  const cosOmega = fround(v328 - v338); // [-1.001, 1.001], 5.6 %
+  const cosOmega = fround(v328 - v338); // [-1.001, 1.001], 6.7 %
   const v339 = fround(xOrbit * cosOmega); // [-27430000, 27430000]
   const v340 = fround(sinphi * v312); // [-1.001, 1.001]
   const v341 = fround(cosphi * v316); // [-0.0003052, 0.0003052]
   const sinu = fround(v340 + v341); // [-1.001, 1.001]
-  const yOrbit = fround(r * sinu); // [-27430000, 27430000], 2.4 %
+  const yOrbit = fround(r * sinu); // [-27430000, 27430000], 1.0 %
   const v342 = fround(IDOT32 * t32); // [-0.00002107, 0.00002107]
   const v343 = fround(Cis32 * sin2phi); // [-0.0001221, 0.0001221]
   const v344 = fround(v342 + v343); // [-0.0001432, 0.0001432]
@@ -517,8 +517,8 @@ export function position(t, state, out) {
   const v352 = fround(v351 * -0.1666666716337204); // [-5.788e-12, 5.788e-12]
   const v353 = fround(v346 + v352); // [-0.0003263, 0.0003263]
   const v354 = fround(v230 * v353); // [-0.000278, 0.000278]
-  const cosi = fround(v350 - v354); // [0.523, 0.6219], 4.3 %
-  const v355 = fround(yOrbit * cosi); // [-17060000, 17060000], 0.9 %
+  const cosi = fround(v350 - v354); // [0.523, 0.6219], 2.4 %
+  const v355 = fround(yOrbit * cosi); // [-17060000, 17060000], 0.7 %
   const v356 = fround(v190 * v327); // [-1.001, 1.001]
   const v357 = fround(v185 * v337); // [-0.5014, 0.5014]
   const sinOmega = fround(v356 + v357); // [-1.001, 1.001]
@@ -530,7 +530,7 @@ export function position(t, state, out) {
   const v363 = fround(v230 * v349); // [0.7833, 0.8522]
   const v364 = fround(v210 * v353); // [-0.0002028, 0.0002028]
   const sini = fround(v363 + v364); // [0.7831, 0.8523]
-  const v365 = fround(yOrbit * sini); // [-23380000, 23380000], 1.7 %
+  const v365 = fround(yOrbit * sini); // [-23380000, 23380000], 0.7 %
   out[0] = v359;
   out[1] = v362;
   out[2] = v365;

@@ -4,7 +4,7 @@
  * Unperturbed elliptic orbit around the Earth, inertial position.
  * Model earth-orbit: Vallado, Fundamentals of Astrodynamics and Applications, sections 2.2 and 2.6; formula sha256 17e97d10c9b5e1806fd1bbcf65dc06c639a4f3bf9a0969558ede3e0955853a46.
  * Domain near-circular. Choices: arithmetic f64, Kepler starter secondOrder, corrector newton, cap 2.
- * Error position_m: at most 1.10e-7 (certified over the domain), 5.22e-8 observed.
+ * Error position_m: at most 1.14e-7 (certified over the domain), 5.22e-8 observed.
  * Beside each line: the range of its value over the domain, and its share of the certified error.
  *
  * Not certified for safety of life. The interface documents, local rules and licensed practice decide.
@@ -100,10 +100,10 @@ export function setup(elements, state) {
   const v57 = 1 - v56; // [-9.001, 5.001]
   const v58 = -v57; // [-5.001, 9.001]
   const v59 = v10 < 0.5 ? v57 : v58; // [-9.001, 9.001]
-  const cosomega = v51 * v59; // [-1.001, 1.001], 6.9 %
+  const cosomega = v51 * v59; // [-1.001, 1.001], 7.1 %
   const v60 = e * e; // [-8.674e-19, 0.01001]
-  const v61 = 1 - v60; // [0.9899, 1.001], 1.1 %
-  const v62 = Math.sqrt(v61); // [0.9949, 1.001], 2.2 %
+  const v61 = 1 - v60; // [0.9899, 1.001]
+  const v62 = Math.sqrt(v61); // [0.9949, 1.001], 0.1 %
   const v63 = v10 < 0.5 ? v50 : v33; // [-47.63, 47.63]
   const sinomega = v63 * v57; // [-1.001, 1.001]
   const v64 = Omega * 0.6366197723675814; // [-2.001, 2.001]
@@ -162,7 +162,7 @@ export function setup(elements, state) {
   const v117 = 1 - v116; // [-9.001, 5.001]
   const v118 = -v117; // [-5.001, 9.001]
   const v119 = v70 < 0.5 ? v117 : v118; // [-9.001, 9.001]
-  const cosOmega = v111 * v119; // [-1.001, 1.001], 5.2 %
+  const cosOmega = v111 * v119; // [-1.001, 1.001], 7.1 %
   const v120 = i * 0.6366197723675814; // [-2.221e-16, 2.001]
   const v121 = v120 + 0.5; // [0.4999, 2.501]
   const v122 = Math.floor(v121); // [0, 2]
@@ -219,7 +219,7 @@ export function setup(elements, state) {
   const v173 = 1 - v172; // [-5.001, 3.001]
   const v174 = -v173; // [-3.001, 5.001]
   const v175 = v126 < 0.5 ? v173 : v174; // [-5.001, 5.001]
-  const cosi = v167 * v175; // [-1.001, 1.001], 7.4 %
+  const cosi = v167 * v175; // [-1.001, 1.001], 6.3 %
   const v176 = v70 < 0.5 ? v110 : v93; // [-47.63, 47.63]
   const sinOmega = v176 * v117; // [-1.001, 1.001]
   const v177 = v126 < 0.5 ? v166 : v149; // [-8.31, 8.31]
@@ -263,8 +263,8 @@ export function position(t, state, out) {
   const sinOmega = state[9];
   const sini = state[10];
   if (!(n > 0)) return 1;
-  const v178 = n * t; // [-8.478, 8.478], 1.1 %
-  const M = M0 + v178; // [-11.62, 11.62], 4.4 %
+  const v178 = n * t; // [-8.478, 8.478], 1.3 %
+  const M = M0 + v178; // [-11.62, 11.62], 5.2 %
   const v179 = M * 0.6366197723675814; // [-7.398, 7.398]
   const v180 = v179 + 0.5; // [-6.898, 7.898]
   const v181 = Math.floor(v180); // [-7, 7]
@@ -321,7 +321,7 @@ export function position(t, state, out) {
   const v232 = 1 - v231; // [-17.01, 13.01]
   const v233 = -v232; // [-13.01, 17.01]
   const v234 = v185 < 0.5 ? v232 : v233; // [-17.01, 17.01]
-  const cosM = v226 * v234; // [-1.001, 1.001], 3.6 %
+  const cosM = v226 * v234; // [-1.001, 1.001], 2.9 %
   const v235 = v185 < 0.5 ? v225 : v208; // [-188300000, 188300000]
   const sinM = v235 * v232; // [-1.001, 1.001]
   const v236 = e * sinM; // [-0.1001, 0.1001]
@@ -387,7 +387,7 @@ export function position(t, state, out) {
   const v296 = v294 - v295; // [-0.1367, 0.1367]
   const v297 = 1 - v296; // [0.8633, 1.137]
   const v298 = v293 / v297; // [-0.5737, 0.5737]
-  const v299 = v269 - v298; // [-0.1001, 0.1001], 0.4 %
+  const v299 = v269 - v298; // [-0.1001, 0.1001], 0.3 %
   const v300 = v299 * v299; // [-8.674e-19, 0.01001]
   const v301 = v300 * -2.755731922398589e-7; // [-2.756e-9, 4.459e-25]
   const v302 = 0.0000248015873015873 + v301; // [0.00002479, 0.00002481]
@@ -398,7 +398,7 @@ export function position(t, state, out) {
   const v307 = v300 * v306; // [-6.325e-20, 0.0004167]
   const v308 = -0.5 + v307; // [-0.5001, -0.4995]
   const v309 = v300 * v308; // [-0.005001, 8.674e-19]
-  const v310 = 1 + v309; // [0.995, 1.001], 3.4 %
+  const v310 = 1 + v309; // [0.995, 1.001], 2.5 %
   const v311 = cosM * v310; // [-1.001, 1.001]
   const v312 = v299 * v300; // [-0.001001, 0.001001]
   const v313 = v300 * 0.0000027557319223985893; // [-4.045e-24, 2.756e-8]
@@ -410,34 +410,34 @@ export function position(t, state, out) {
   const v319 = v312 * v318; // [-0.0001667, 0.0001667]
   const v320 = v299 + v319; // [-0.09984, 0.09984]
   const v321 = sinM * v320; // [-0.09984, 0.09984]
-  const cosE = v311 - v321; // [-1.001, 1.001], 4.2 %
+  const cosE = v311 - v321; // [-1.001, 1.001], 5.5 %
   const v322 = e * cosE; // [-0.1001, 0.1001]
   const v323 = 1 - v322; // [0.8999, 1.101]
-  const r = a * v323; // [5939000, 47310000], 2.9 %
-  const v324 = cosE - e; // [-1.101, 1.001], 0.8 %
-  const v325 = 1 / v323; // [0.909, 1.112], 3.5 %
-  const cosnu = v324 * v325; // [-1.001, 1.001], 0.8 %
+  const r = a * v323; // [5939000, 47310000], 2.2 %
+  const v324 = cosE - e; // [-1.101, 1.001], 2.6 %
+  const v325 = 1 / v323; // [0.909, 1.112], 1.4 %
+  const cosnu = v324 * v325; // [-1.001, 1.001], 2.8 %
   const v326 = cosnu * cosomega; // [-1.001, 1.001]
   const v327 = sinM * v310; // [-1.001, 1.001]
   const v328 = cosM * v320; // [-0.09984, 0.09984]
   const sinE = v327 + v328; // [-1.001, 1.001]
-  const v329 = v62 * sinE; // [-1.001, 1.001]
-  const sinnu = v329 * v325; // [-1.112, 1.112]
+  const v329 = v62 * sinE; // [-1.001, 1.001], 0.2 %
+  const sinnu = v329 * v325; // [-1.112, 1.112], 0.2 %
   const v330 = sinnu * sinomega; // [-1.112, 1.112]
-  const cosu = v326 - v330; // [-1.001, 1.001], 6.0 %
-  const xOrbit = r * cosu; // [-47310000, 47310000], 0.4 %
+  const cosu = v326 - v330; // [-1.001, 1.001], 4.9 %
+  const xOrbit = r * cosu; // [-47310000, 47310000], 0.3 %
   const v331 = xOrbit * cosOmega; // [-47310000, 47310000]
   const v332 = sinnu * cosomega; // [-1.112, 1.112]
   const v333 = cosnu * sinomega; // [-1.001, 1.001]
   const sinu = v332 + v333; // [-1.001, 1.001]
   const yOrbit = r * sinu; // [-47310000, 47310000], 3.2 %
-  const v334 = yOrbit * cosi; // [-47310000, 47310000], 2.0 %
+  const v334 = yOrbit * cosi; // [-47310000, 47310000], 2.9 %
   const v335 = v334 * sinOmega; // [-47310000, 47310000]
   const v336 = v331 - v335; // [-94610000, 94610000]
   const v337 = xOrbit * sinOmega; // [-47310000, 47310000]
   const v338 = v334 * cosOmega; // [-47310000, 47310000]
   const v339 = v337 + v338; // [-94610000, 94610000]
-  const v340 = yOrbit * sini; // [-47310000, 47310000], 1.5 %
+  const v340 = yOrbit * sini; // [-47310000, 47310000], 0.7 %
   out[0] = v336;
   out[1] = v339;
   out[2] = v340;

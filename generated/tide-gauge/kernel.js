@@ -4,7 +4,7 @@
  * GPS broadcast ephemeris (legacy navigation message), Earth-fixed position and clock.
  * Model gps-lnav: IS-GPS-200, Table 20-IV and 20.3.3.3.3; formula sha256 5f836c5a9091cf697931b1ab8c6fb4ce7d2fbf92e8c01aaf6eb3273e2c4ce794.
  * Domain flown. Choices: arithmetic f64, Kepler starter secondOrder, corrector newton, cap 2.
- * Error position_m: at most 2.61e-7 (certified over the domain), 2.17e-7 observed.
+ * Error position_m: at most 2.62e-7 (certified over the domain), 2.17e-7 observed.
  * Beside each line: the range of its value over the domain, and its share of the certified error.
  *
  * Not certified for safety of life. The interface documents, local rules and licensed practice decide.
@@ -70,7 +70,7 @@ export function setup(elements, state) {
   if (!(Cis >= -0.00006103515625061035 && Cis <= 0.0000610332936054611)) return Cis - Cis === 0 ? 1 : 3;
   const toe = elements.toe;
   if (!(toe >= 0 && toe <= 604784)) return toe - toe === 0 ? 1 : 3;
-  const A = sqrtA * sqrtA; // [26520000, 26630000], 0.5 %
+  const A = sqrtA * sqrtA; // [26520000, 26630000], 0.7 %
   const v1 = M0 * 0.6366197723675814; // [-2.001, 2.001]
   const v2 = v1 + 0.5; // [-1.501, 2.501]
   const v3 = Math.floor(v2); // [-2, 2]
@@ -127,17 +127,17 @@ export function setup(elements, state) {
   const v54 = 1 - v53; // [-9.001, 5.001]
   const v55 = -v54; // [-5.001, 9.001]
   const v56 = v7 < 0.5 ? v54 : v55; // [-9.001, 9.001]
-  const v57 = v48 * v56; // [-1.001, 1.001], 1.7 %
-  const v58 = A * A; // [703400000000000, 709000000000000], 0.3 %
+  const v57 = v48 * v56; // [-1.001, 1.001], 1.2 %
+  const v58 = A * A; // [703400000000000, 709000000000000], 0.2 %
   const v59 = v58 * A; // [1.865e+22, 1.888e+22], 0.2 %
   const v60 = 398600500000000 / v59; // [2.111e-8, 2.137e-8], 0.2 %
-  const n0 = Math.sqrt(v60); // [0.0001453, 0.0001462], 0.6 %
-  const n = n0 + deltaN; // [0.0001453, 0.0001462], 0.6 %
+  const n0 = Math.sqrt(v60); // [0.0001453, 0.0001462], 0.5 %
+  const n = n0 + deltaN; // [0.0001453, 0.0001462], 0.5 %
   const v61 = v7 < 0.5 ? v47 : v30; // [-47.63, 47.63]
   const v62 = v61 * v54; // [-1.001, 1.001]
   const v63 = e * e; // [-5.422e-20, 0.0009001]
-  const v64 = 1 - v63; // [0.999, 1.001]
-  const v65 = Math.sqrt(v64); // [0.9995, 1.001], 0.1 %
+  const v64 = 1 - v63; // [0.999, 1.001], 0.1 %
+  const v65 = Math.sqrt(v64); // [0.9995, 1.001], 0.3 %
   const v66 = omega * 0.6366197723675814; // [-2.001, 2.001]
   const v67 = v66 + 0.5; // [-1.501, 2.501]
   const v68 = Math.floor(v67); // [-2, 2]
@@ -194,11 +194,11 @@ export function setup(elements, state) {
   const v119 = 1 - v118; // [-9.001, 5.001]
   const v120 = -v119; // [-5.001, 9.001]
   const v121 = v72 < 0.5 ? v119 : v120; // [-9.001, 9.001]
-  const cosomega = v113 * v121; // [-1.001, 1.001], 0.3 %
+  const cosomega = v113 * v121; // [-1.001, 1.001], 1.0 %
   const v122 = v72 < 0.5 ? v112 : v95; // [-47.63, 47.63]
   const sinomega = v122 * v119; // [-1.001, 1.001]
-  const v123 = 0.000072921151467 * toe; // [-3.553e-15, 44.11], 35.5 %
-  const v124 = Omega0 - v123; // [-47.25, 3.142], 35.5 %
+  const v123 = 0.000072921151467 * toe; // [-3.553e-15, 44.11], 35.7 %
+  const v124 = Omega0 - v123; // [-47.25, 3.142], 35.7 %
   const v125 = v124 * 0.6366197723675814; // [-30.08, 2.001]
   const v126 = v125 + 0.5; // [-29.58, 2.501]
   const v127 = Math.floor(v126); // [-30, 2]
@@ -255,7 +255,7 @@ export function setup(elements, state) {
   const v178 = 1 - v177; // [-37.01, 33.01]
   const v179 = -v178; // [-33.01, 37.01]
   const v180 = v131 < 0.5 ? v178 : v179; // [-37.01, 37.01]
-  const v181 = v172 * v180; // [-1.001, 1.001], 2.5 %
+  const v181 = v172 * v180; // [-1.001, 1.001], 2.4 %
   const v182 = OmegaDot - 0.000072921151467; // [-0.00007294, -0.00007292], 0.4 %
   const v183 = v131 < 0.5 ? v171 : v154; // [-220300000000000, 219700000000000]
   const v184 = v183 * v178; // [-1.001, 1.001]
@@ -354,7 +354,7 @@ export function position(t, state, out) {
   const v203 = state[18];
   const v222 = state[19];
   if (!(n > 0)) return 1;
-  const v223 = n * t; // [-1.053, 1.053], 0.7 %
+  const v223 = n * t; // [-1.053, 1.053], 0.8 %
   const v224 = v223 * v223; // [-1.111e-16, 1.108]
   const v225 = v224 * -1.5619206968586225e-16; // [-1.731e-16, 2.967e-32]
   const v226 = 4.779477332387385e-14 + v225; // [4.762e-14, 4.78e-14]
@@ -373,7 +373,7 @@ export function position(t, state, out) {
   const v239 = v224 * v238; // [-8.096e-18, 0.04616]
   const v240 = -0.5 + v239; // [-0.5001, -0.4538]
   const v241 = v224 * v240; // [-0.5539, 1.111e-16]
-  const v242 = 1 + v241; // [0.4954, 1.001], 1.6 %
+  const v242 = 1 + v241; // [0.4954, 1.001], 1.7 %
   const v243 = v57 * v242; // [-1.001, 1.001]
   const v244 = v223 * v224; // [-1.166, 1.166]
   const v245 = v224 * -8.22063524662433e-18; // [-9.107e-18, 1.684e-33]
@@ -454,7 +454,7 @@ export function position(t, state, out) {
   const v318 = v316 - v317; // [-0.03285, 0.03285]
   const v319 = 1 - v318; // [0.9671, 1.033]
   const v320 = v315 / v319; // [-0.1319, 0.1319]
-  const v321 = v295 - v320; // [-0.03001, 0.03001]
+  const v321 = v295 - v320; // [-0.03001, 0.03001], 0.1 %
   const v322 = v321 * v321; // [-5.422e-20, 0.0009001]
   const v323 = v322 * 0.0000248015873015873; // [-2.999e-24, 2.233e-8]
   const v324 = -0.001388888888888889 + v323; // [-0.001389, -0.001388]
@@ -463,7 +463,7 @@ export function position(t, state, out) {
   const v327 = v322 * v326; // [-5.647e-21, 0.00003751]
   const v328 = -0.5 + v327; // [-0.5001, -0.4999]
   const v329 = v322 * v328; // [-0.0004501, 5.422e-20]
-  const v330 = 1 + v329; // [0.9995, 1.001], 0.3 %
+  const v330 = 1 + v329; // [0.9995, 1.001], 0.2 %
   const v331 = cosM * v330; // [-1.001, 1.001]
   const v332 = v321 * v322; // [-0.00002701, 0.00002701]
   const v333 = v322 * -0.0001984126984126984; // [-1.786e-7, 2.4e-23]
@@ -473,16 +473,16 @@ export function position(t, state, out) {
   const v337 = v332 * v336; // [-0.000004501, 0.000004501]
   const v338 = v321 + v337; // [-0.03, 0.03]
   const v339 = sinM * v338; // [-0.03, 0.03]
-  const cosE = v331 - v339; // [-1.001, 1.001], 0.8 %
+  const cosE = v331 - v339; // [-1.001, 1.001], 1.1 %
   const v340 = e * cosE; // [-0.03001, 0.03001]
   const v341 = 1 - v340; // [0.9699, 1.031]
-  const v342 = A * v341; // [25720000, 27430000], 0.2 %
+  const v342 = A * v341; // [25720000, 27430000], 0.1 %
   const v343 = sinM * v330; // [-1.001, 1.001]
   const v344 = cosM * v338; // [-0.03, 0.03]
   const sinE = v343 + v344; // [-1.001, 1.001]
-  const v345 = v65 * sinE; // [-1.001, 1.001]
-  const v346 = 1 / v341; // [0.9708, 1.031], 0.3 %
-  const sinnu = v345 * v346; // [-1.031, 1.031]
+  const v345 = v65 * sinE; // [-1.001, 1.001], 0.3 %
+  const v346 = 1 / v341; // [0.9708, 1.031], 0.2 %
+  const sinnu = v345 * v346; // [-1.031, 1.031], 0.3 %
   const v347 = sinnu * cosomega; // [-1.031, 1.031]
   const v348 = cosE - e; // [-1.031, 1.001], 0.3 %
   const cosnu = v348 * v346; // [-1.001, 1.001], 0.3 %
@@ -491,14 +491,14 @@ export function position(t, state, out) {
   const v350 = sinphi + sinphi; // [-2.001, 2.001]
   const v351 = cosnu * cosomega; // [-1.001, 1.001]
   const v352 = sinnu * sinomega; // [-1.031, 1.031]
-  const cosphi = v351 - v352; // [-1.001, 1.001], 0.8 %
+  const cosphi = v351 - v352; // [-1.001, 1.001], 1.0 %
   const sin2phi = v350 * cosphi; // [-2.001, 2.001]
   const v353 = Crs * sin2phi; // [-2049, 2049]
   const v354 = v350 * sinphi; // [-2.001, 2.001]
   const cos2phi = 1 - v354; // [-1.001, 3.001]
   const v355 = Crc * cos2phi; // [-3073, 3072]
   const v356 = v353 + v355; // [-5121, 5120]
-  const r = v342 + v356; // [25720000, 27430000], 0.2 %
+  const r = v342 + v356; // [25720000, 27430000], 0.1 %
   const v357 = Cus * sin2phi; // [-0.0001221, 0.0001221]
   const v358 = Cuc * cos2phi; // [-0.0001832, 0.0001831]
   const v359 = v357 + v358; // [-0.0003052, 0.0003052]
@@ -506,7 +506,7 @@ export function position(t, state, out) {
   const v361 = v360 * 0.041666666666666664; // [-6.894e-25, 3.881e-9]
   const v362 = -0.5 + v361; // [-0.5001, -0.4999]
   const v363 = v360 * v362; // [-4.657e-8, 6.618e-24]
-  const v364 = 1 + v363; // [0.9999, 1.001], 0.3 %
+  const v364 = 1 + v363; // [0.9999, 1.001], 0.2 %
   const v365 = cosphi * v364; // [-1.001, 1.001]
   const v366 = v359 * v360; // [-2.843e-11, 2.843e-11]
   const v367 = v360 * 0.008333333333333333; // [-1.069e-25, 7.762e-10]
@@ -514,8 +514,8 @@ export function position(t, state, out) {
   const v369 = v366 * v368; // [-4.737e-12, 4.737e-12]
   const v370 = v359 + v369; // [-0.0003052, 0.0003052]
   const v371 = sinphi * v370; // [-0.0003052, 0.0003052]
-  const cosu = v365 - v371; // [-1.001, 1.001], 0.7 %
-  const xOrbit = r * cosu; // [-27430000, 27430000], 0.2 %
+  const cosu = v365 - v371; // [-1.001, 1.001], 0.5 %
+  const xOrbit = r * cosu; // [-27430000, 27430000], 0.1 %
   const v372 = v182 * t; // [-0.5252, 0.5252], 0.6 %
   const v373 = v372 * v372; // [-2.776e-17, 0.2758]
   const v374 = v373 * -1.1470745597729725e-11; // [-3.163e-12, 5.204e-28]
@@ -531,7 +531,7 @@ export function position(t, state, out) {
   const v384 = v373 * v383; // [-2.024e-18, 0.01149]
   const v385 = -0.5 + v384; // [-0.5001, -0.4885]
   const v386 = v373 * v385; // [-0.1379, 2.776e-17]
-  const v387 = 1 + v386; // [0.8652, 1.001], 1.1 %
+  const v387 = 1 + v386; // [0.8652, 1.001], 0.9 %
   const v388 = v181 * v387; // [-1.001, 1.001]
   const v389 = v372 * v373; // [-0.1448, 0.1448]
   const v390 = v373 * -7.647163731819816e-13; // [-2.109e-13, 3.385e-29]
@@ -549,7 +549,7 @@ export function position(t, state, out) {
   const v402 = v389 * v401; // [-0.02414, 0.02414]
   const v403 = v372 + v402; // [-0.5014, 0.5014]
   const v404 = v184 * v403; // [-0.5014, 0.5014]
-  const cosOmega = v388 - v404; // [-1.001, 1.001], 2.6 %
+  const cosOmega = v388 - v404; // [-1.001, 1.001], 2.5 %
   const v405 = xOrbit * cosOmega; // [-27430000, 27430000]
   const v406 = sinphi * v364; // [-1.001, 1.001]
   const v407 = cosphi * v370; // [-0.0003052, 0.0003052]

@@ -4,7 +4,7 @@
  * GPS broadcast ephemeris (legacy navigation message), Earth-fixed position and clock.
  * Model gps-lnav: IS-GPS-200, Table 20-IV and 20.3.3.3.3; formula sha256 ec2b4702d331511f6298b091907f84a6a71366c481a63dcd1c612ba90bb1a12d.
  * Domain flown. Choices: arithmetic f64, Kepler starter secondOrder, corrector newton, cap 2.
- * Error position_m: at most 2.61e-7 (certified over the domain), 2.22e-7 observed.
+ * Error position_m: at most 2.62e-7 (certified over the domain), 2.22e-7 observed.
  * Error clock_s: at most 4.41e-19 (certified over the domain), 4.41e-19 observed.
  * Beside each line: the range of its value over the domain, and its share of the certified error.
  *
@@ -86,7 +86,7 @@ export function setup(elements, state) {
   if (!(TGD >= -5.960464477598667e-8 && TGD <= 5.9138983488674274e-8)) return TGD - TGD === 0 ? 1 : 3;
   const toeMinusToc = elements.toeMinusToc;
   if (!(toeMinusToc >= -7200 && toeMinusToc <= 7200)) return toeMinusToc - toeMinusToc === 0 ? 1 : 3;
-  const A = sqrtA * sqrtA; // [26520000, 26630000], 0.5 % of position
+  const A = sqrtA * sqrtA; // [26520000, 26630000], 0.7 % of position
   const v1 = M0 * 0.6366197723675814; // [-2.001, 2.001]
   const v2 = v1 + 0.5; // [-1.501, 2.501]
   const v3 = Math.floor(v2); // [-2, 2]
@@ -143,17 +143,17 @@ export function setup(elements, state) {
   const v54 = 1 - v53; // [-9.001, 5.001]
   const v55 = -v54; // [-5.001, 9.001]
   const v56 = v7 < 0.5 ? v54 : v55; // [-9.001, 9.001]
-  const v57 = v48 * v56; // [-1.001, 1.001], 1.7 % of position
-  const v58 = A * A; // [703400000000000, 709000000000000], 0.3 % of position
+  const v57 = v48 * v56; // [-1.001, 1.001], 1.2 % of position
+  const v58 = A * A; // [703400000000000, 709000000000000], 0.2 % of position
   const v59 = v58 * A; // [1.865e+22, 1.888e+22], 0.2 % of position
   const v60 = 398600500000000 / v59; // [2.111e-8, 2.137e-8], 0.2 % of position
-  const n0 = Math.sqrt(v60); // [0.0001453, 0.0001462], 0.6 % of position
-  const n = n0 + deltaN; // [0.0001453, 0.0001462], 0.6 % of position
+  const n0 = Math.sqrt(v60); // [0.0001453, 0.0001462], 0.5 % of position
+  const n = n0 + deltaN; // [0.0001453, 0.0001462], 0.5 % of position
   const v61 = v7 < 0.5 ? v47 : v30; // [-47.63, 47.63]
   const v62 = v61 * v54; // [-1.001, 1.001]
   const v63 = e * e; // [-5.422e-20, 0.0009001]
-  const v64 = 1 - v63; // [0.999, 1.001]
-  const v65 = Math.sqrt(v64); // [0.9995, 1.001], 0.1 % of position
+  const v64 = 1 - v63; // [0.999, 1.001], 0.1 % of position
+  const v65 = Math.sqrt(v64); // [0.9995, 1.001], 0.3 % of position
   const v66 = omega * 0.6366197723675814; // [-2.001, 2.001]
   const v67 = v66 + 0.5; // [-1.501, 2.501]
   const v68 = Math.floor(v67); // [-2, 2]
@@ -210,11 +210,11 @@ export function setup(elements, state) {
   const v119 = 1 - v118; // [-9.001, 5.001]
   const v120 = -v119; // [-5.001, 9.001]
   const v121 = v72 < 0.5 ? v119 : v120; // [-9.001, 9.001]
-  const cosomega = v113 * v121; // [-1.001, 1.001], 0.3 % of position
+  const cosomega = v113 * v121; // [-1.001, 1.001], 1.0 % of position
   const v122 = v72 < 0.5 ? v112 : v95; // [-47.63, 47.63]
   const sinomega = v122 * v119; // [-1.001, 1.001]
-  const v123 = 0.000072921151467 * toe; // [-3.553e-15, 44.11], 35.5 % of position
-  const v124 = Omega0 - v123; // [-47.25, 3.142], 35.5 % of position
+  const v123 = 0.000072921151467 * toe; // [-3.553e-15, 44.11], 35.7 % of position
+  const v124 = Omega0 - v123; // [-47.25, 3.142], 35.7 % of position
   const v125 = v124 * 0.6366197723675814; // [-30.08, 2.001]
   const v126 = v125 + 0.5; // [-29.58, 2.501]
   const v127 = Math.floor(v126); // [-30, 2]
@@ -271,7 +271,7 @@ export function setup(elements, state) {
   const v178 = 1 - v177; // [-37.01, 33.01]
   const v179 = -v178; // [-33.01, 37.01]
   const v180 = v131 < 0.5 ? v178 : v179; // [-37.01, 37.01]
-  const v181 = v172 * v180; // [-1.001, 1.001], 2.5 % of position
+  const v181 = v172 * v180; // [-1.001, 1.001], 2.4 % of position
   const v182 = OmegaDot - 0.000072921151467; // [-0.00007294, -0.00007292], 0.4 % of position
   const v183 = v131 < 0.5 ? v171 : v154; // [-220300000000000, 219700000000000]
   const v184 = v183 * v178; // [-1.001, 1.001]
@@ -385,7 +385,7 @@ export function position(t, state, out) {
   const v224 = state[24];
   const TGD = state[25];
   if (!(n > 0)) return 1;
-  const v225 = n * t; // [-1.053, 1.053], 0.7 % of position
+  const v225 = n * t; // [-1.053, 1.053], 0.8 % of position
   const v226 = v225 * v225; // [-1.111e-16, 1.108]
   const v227 = v226 * -1.5619206968586225e-16; // [-1.731e-16, 2.967e-32]
   const v228 = 4.779477332387385e-14 + v227; // [4.762e-14, 4.78e-14]
@@ -404,7 +404,7 @@ export function position(t, state, out) {
   const v241 = v226 * v240; // [-8.096e-18, 0.04616]
   const v242 = -0.5 + v241; // [-0.5001, -0.4538]
   const v243 = v226 * v242; // [-0.5539, 1.111e-16]
-  const v244 = 1 + v243; // [0.4954, 1.001], 1.6 % of position
+  const v244 = 1 + v243; // [0.4954, 1.001], 1.7 % of position
   const v245 = v57 * v244; // [-1.001, 1.001]
   const v246 = v225 * v226; // [-1.166, 1.166]
   const v247 = v226 * -8.22063524662433e-18; // [-9.107e-18, 1.684e-33]
@@ -485,7 +485,7 @@ export function position(t, state, out) {
   const v320 = v318 - v319; // [-0.03285, 0.03285]
   const v321 = 1 - v320; // [0.9671, 1.033]
   const v322 = v317 / v321; // [-0.1319, 0.1319]
-  const v323 = v297 - v322; // [-0.03001, 0.03001]
+  const v323 = v297 - v322; // [-0.03001, 0.03001], 0.1 % of position
   const v324 = v323 * v323; // [-5.422e-20, 0.0009001]
   const v325 = v324 * 0.0000248015873015873; // [-2.999e-24, 2.233e-8]
   const v326 = -0.001388888888888889 + v325; // [-0.001389, -0.001388]
@@ -494,7 +494,7 @@ export function position(t, state, out) {
   const v329 = v324 * v328; // [-5.647e-21, 0.00003751]
   const v330 = -0.5 + v329; // [-0.5001, -0.4999]
   const v331 = v324 * v330; // [-0.0004501, 5.422e-20]
-  const v332 = 1 + v331; // [0.9995, 1.001], 0.3 % of position
+  const v332 = 1 + v331; // [0.9995, 1.001], 0.2 % of position
   const v333 = cosM * v332; // [-1.001, 1.001]
   const v334 = v323 * v324; // [-0.00002701, 0.00002701]
   const v335 = v324 * -0.0001984126984126984; // [-1.786e-7, 2.4e-23]
@@ -504,16 +504,16 @@ export function position(t, state, out) {
   const v339 = v334 * v338; // [-0.000004501, 0.000004501]
   const v340 = v323 + v339; // [-0.03, 0.03]
   const v341 = sinM * v340; // [-0.03, 0.03]
-  const cosE = v333 - v341; // [-1.001, 1.001], 0.8 % of position
+  const cosE = v333 - v341; // [-1.001, 1.001], 1.1 % of position
   const v342 = e * cosE; // [-0.03001, 0.03001]
   const v343 = 1 - v342; // [0.9699, 1.031]
-  const v344 = A * v343; // [25720000, 27430000], 0.2 % of position
+  const v344 = A * v343; // [25720000, 27430000], 0.1 % of position
   const v345 = sinM * v332; // [-1.001, 1.001]
   const v346 = cosM * v340; // [-0.03, 0.03]
   const sinE = v345 + v346; // [-1.001, 1.001]
-  const v347 = v65 * sinE; // [-1.001, 1.001]
-  const v348 = 1 / v343; // [0.9708, 1.031], 0.3 % of position
-  const sinnu = v347 * v348; // [-1.031, 1.031]
+  const v347 = v65 * sinE; // [-1.001, 1.001], 0.3 % of position
+  const v348 = 1 / v343; // [0.9708, 1.031], 0.2 % of position
+  const sinnu = v347 * v348; // [-1.031, 1.031], 0.3 % of position
   const v349 = sinnu * cosomega; // [-1.031, 1.031]
   const v350 = cosE - e; // [-1.031, 1.001], 0.3 % of position
   const cosnu = v350 * v348; // [-1.001, 1.001], 0.3 % of position
@@ -522,14 +522,14 @@ export function position(t, state, out) {
   const v352 = sinphi + sinphi; // [-2.001, 2.001]
   const v353 = cosnu * cosomega; // [-1.001, 1.001]
   const v354 = sinnu * sinomega; // [-1.031, 1.031]
-  const cosphi = v353 - v354; // [-1.001, 1.001], 0.8 % of position
+  const cosphi = v353 - v354; // [-1.001, 1.001], 1.0 % of position
   const sin2phi = v352 * cosphi; // [-2.001, 2.001]
   const v355 = Crs * sin2phi; // [-2049, 2049]
   const v356 = v352 * sinphi; // [-2.001, 2.001]
   const cos2phi = 1 - v356; // [-1.001, 3.001]
   const v357 = Crc * cos2phi; // [-3073, 3072]
   const v358 = v355 + v357; // [-5121, 5120]
-  const r = v344 + v358; // [25720000, 27430000], 0.2 % of position
+  const r = v344 + v358; // [25720000, 27430000], 0.1 % of position
   const v359 = Cus * sin2phi; // [-0.0001221, 0.0001221]
   const v360 = Cuc * cos2phi; // [-0.0001832, 0.0001831]
   const v361 = v359 + v360; // [-0.0003052, 0.0003052]
@@ -537,7 +537,7 @@ export function position(t, state, out) {
   const v363 = v362 * 0.041666666666666664; // [-6.894e-25, 3.881e-9]
   const v364 = -0.5 + v363; // [-0.5001, -0.4999]
   const v365 = v362 * v364; // [-4.657e-8, 6.618e-24]
-  const v366 = 1 + v365; // [0.9999, 1.001], 0.3 % of position
+  const v366 = 1 + v365; // [0.9999, 1.001], 0.2 % of position
   const v367 = cosphi * v366; // [-1.001, 1.001]
   const v368 = v361 * v362; // [-2.843e-11, 2.843e-11]
   const v369 = v362 * 0.008333333333333333; // [-1.069e-25, 7.762e-10]
@@ -545,8 +545,8 @@ export function position(t, state, out) {
   const v371 = v368 * v370; // [-4.737e-12, 4.737e-12]
   const v372 = v361 + v371; // [-0.0003052, 0.0003052]
   const v373 = sinphi * v372; // [-0.0003052, 0.0003052]
-  const cosu = v367 - v373; // [-1.001, 1.001], 0.7 % of position
-  const xOrbit = r * cosu; // [-27430000, 27430000], 0.2 % of position
+  const cosu = v367 - v373; // [-1.001, 1.001], 0.5 % of position
+  const xOrbit = r * cosu; // [-27430000, 27430000], 0.1 % of position
   const v374 = v182 * t; // [-0.5252, 0.5252], 0.6 % of position
   const v375 = v374 * v374; // [-2.776e-17, 0.2758]
   const v376 = v375 * -1.1470745597729725e-11; // [-3.163e-12, 5.204e-28]
@@ -562,7 +562,7 @@ export function position(t, state, out) {
   const v386 = v375 * v385; // [-2.024e-18, 0.01149]
   const v387 = -0.5 + v386; // [-0.5001, -0.4885]
   const v388 = v375 * v387; // [-0.1379, 2.776e-17]
-  const v389 = 1 + v388; // [0.8652, 1.001], 1.1 % of position
+  const v389 = 1 + v388; // [0.8652, 1.001], 0.9 % of position
   const v390 = v181 * v389; // [-1.001, 1.001]
   const v391 = v374 * v375; // [-0.1448, 0.1448]
   const v392 = v375 * -7.647163731819816e-13; // [-2.109e-13, 3.385e-29]
@@ -580,7 +580,7 @@ export function position(t, state, out) {
   const v404 = v391 * v403; // [-0.02414, 0.02414]
   const v405 = v374 + v404; // [-0.5014, 0.5014]
   const v406 = v184 * v405; // [-0.5014, 0.5014]
-  const cosOmega = v390 - v406; // [-1.001, 1.001], 2.6 % of position
+  const cosOmega = v390 - v406; // [-1.001, 1.001], 2.5 % of position
   const v407 = xOrbit * cosOmega; // [-27430000, 27430000]
   const v408 = sinphi * v366; // [-1.001, 1.001]
   const v409 = cosphi * v372; // [-0.0003052, 0.0003052]
