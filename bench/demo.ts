@@ -7,7 +7,6 @@ import { taskOf } from '../codegen/choose/task.ts';
 import { judgeOf, makeVariant, type Task, type Variant } from '../codegen/choose/variant.ts';
 import { ProgressLine } from '../codegen/command/progress.ts';
 import { formatTable } from '../codegen/command/table.ts';
-import { codeSize } from '../codegen/cost/code-size.ts';
 import { FULL_EFFORT, type Observed, observe } from '../codegen/observe/observe.ts';
 import type { Point } from '../codegen/observe/points.ts';
 import type { NavigationRecord } from '../src/messages/navigation-record.ts';
@@ -81,7 +80,7 @@ async function main(): Promise<void> {
       FULL_EFFORT,
       (share) => progress.show(variantName(choices), share),
     ) as [Observed];
-    const { bytes, minified_bytes } = await codeSize(variant.code);
+    const { bytes, minified_bytes } = certificate.code;
     rows.push([
       variantName(choices),
       variant.cost.tick.total,

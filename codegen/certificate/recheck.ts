@@ -51,6 +51,10 @@ export async function recheck(
   const expected = makeVariant(task, certificate.choices);
   const file = join(folder, FILES.code);
   const lines = compareLines(file, code, expected);
+  const text = compareFacts(folder, [
+    ['code', certificate.code, await codeSize(code)],
+    ['digest.kernel', certificate.digest.kernel, digest(code)],
+  ]);
   const cheap = [
     ...lines,
     ...(await compareCertificate(folder, certificate, task, expected, code)),
@@ -61,10 +65,15 @@ export async function recheck(
   const kernel = toKernel(parseKernel(file, code), expected.kernel);
   const proofs = certify({ ...expected.lowered, kernel }, PROOF_EFFORT, progress);
   const remarks = remarksOf(kernel, certificate.error, proofs);
-  const text = describeVariant(task, expected.lowered, remarks).code;
+  const due = describeVariant(task, expected.lowered, remarks).code;
   const proven = compareProof(folder, certificate, kernel, proofs);
   return {
-    findings: [...cheap, ...proven, ...(lines.length > 0 ? [] : compareText(file, code, text))],
+    findings: [
+      ...(lines.length > 0 ? lines : compareText(file, code, due)),
+      ...cheap.slice(lines.length),
+      ...text,
+      ...proven,
+    ],
     proofs,
   };
 }
@@ -132,8 +141,6 @@ async function compareCertificate(
     ['domain.ranges', certificate.domain.ranges, ranges],
     ['operations', certificate.operations, expected.cost],
     ['state', certificate.state, { words: expected.kernel.state.length, bytes: expected.stateBytes }],
-    ['code', certificate.code, await codeSize(code)],
-    ['digest.kernel', certificate.digest.kernel, digest(code)],
     ['digest.model', certificate.digest.model, digest(printFormula(task.formula))],
     ['digest.outputs', certificate.digest.outputs, outputsDigest(judge, task.domain, names)],
   ];

@@ -34,7 +34,7 @@ const MODELS: readonly (SmallModel & { readonly tight: boolean })[] = [
   },
   { name: 'root', body: '', returns: 'Math.sqrt(t) / (t - 0.3)', ranges: { t: [1, 4] }, tight: true },
   { name: 'radius', body: ORBIT, returns: '7 * (1 - 0.3 * Math.cos(E))', ranges: { t: [1, 4] }, tight: true },
-  { name: 'offset', body: '', returns: 'eccentricAnomaly(t, 0.2) - t', ranges: { t: [1, 4] }, tight: false },
+  { name: 'offset', body: '', returns: 'eccentricAnomaly(t, 0.2) - t', ranges: { t: [1, 4] }, tight: true },
 ];
 
 /** A certified error is at most so many times the largest error there is. */

@@ -188,9 +188,9 @@ function swapTurn(code: string): string {
 
 /** Repeats the last division and its subtraction once more. */
 function oneCorrectionMore(code: string): string {
-  const last = [...code.matchAll(/ {2}const (v\d+) = v\d+ \/ v\d+;\n {2}const (v\d+) = v\d+ - v\d+;\n/g)].at(
-    -1,
-  )!;
+  const last = [
+    ...code.matchAll(/ {2}const (v\d+) = v\d+ \/ v\d+;.*\n {2}const (v\d+) = v\d+ - v\d+;.*\n/g),
+  ].at(-1)!;
   return code.replace(
     last[0],
     `${last[0]}  const again = ${last[1]} / ${last[1]};\n  const more = ${last[2]} - again;\n`,
