@@ -4,6 +4,7 @@ import type { Node } from '../formula/node.ts';
 import type { Bounds } from '../formula/ranges.ts';
 import type { Corrector } from '../kernel/choices.ts';
 import * as interval from '../numbers/interval.ts';
+import type { CellError } from './kepler-cells.ts';
 
 /** Room for rounding in products and sums of bounds. */
 const SLACK = 1 + 2 ** -36;
@@ -48,6 +49,32 @@ export class KeplerConvergence {
     this.room = room;
     this.residual = graph.make('sub', guess, graph.make('mul', e, sine));
     this.gradient = new IntervalGradient([this.residual, guess], [sinM, cosM, e], 2);
+  }
+
+  /**
+   * Bound on the error of a solver over a cell, rad; Infinity where none is found.
+   *
+   * @param M mean anomaly
+   * @param e eccentricity
+   * @param cap number of corrections
+   * @param rounding error that the lines of the starter (0) or a correction (1 to cap) add, for D in a range
+   */
+  error(
+    M: Bounds,
+    e: Bounds,
+    cap: number,
+    rounding: (iterate: number, D: Bounds) => number = () => 0,
+  ): CellError {
+    const exact = this.exact(M, e);
+    const grown = ({ lo, hi }: Bounds, by: number): Bounds => ({ lo: lo - by, hi: hi + by });
+    let added = rounding(0, exact);
+    let error = grown(this.start(M, e, exact), added);
+    for (let k = 1; k <= cap; k++) {
+      added = rounding(k, { lo: exact.lo + error.lo, hi: exact.hi + error.hi });
+      error = grown(this.step(M, e, exact, error), added);
+    }
+    const most = Math.max(-error.lo, error.hi) * SLACK;
+    return Number.isNaN(most) ? { error: Infinity, rounding: 0 } : { error: most, rounding: added };
   }
 
   /** Range of the exact D over a cell. */

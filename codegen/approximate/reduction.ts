@@ -1,13 +1,10 @@
 import type { Graph } from '../formula/graph.ts';
 import type { Node } from '../formula/node.ts';
-import type { Format } from '../kernel/choices.ts';
+import { BITS, type Format } from '../kernel/choices.ts';
 import { splitHalfPi } from './half-pi.ts';
 
 /** Largest remainder of the reduction: pi / 4 and room for a quotient that rounding puts into the next quarter. */
 export const REDUCED_RADIUS = 0.7855;
-
-/** Bits of a number of each format. */
-const BITS: Readonly<Record<Format, number>> = { f64: 53, f32: 24 };
 
 /** An angle x = q pi / 2 + r with |r| <= REDUCED_RADIUS, and how r gives the sine and cosine of x. */
 export interface Reduction {

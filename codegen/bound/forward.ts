@@ -5,9 +5,6 @@ import { RealRanges, SLACK } from './real-ranges.ts';
 import { halfUnit } from './rounding.ts';
 import type { Entry, SineErrors, Tape } from './tape.ts';
 
-/** Rounding of products of turns in each format. */
-const PRODUCTS = { f64: new ProductRounding('f64'), f32: new ProductRounding('f32') } as const;
-
 /** More than half a turn: an angle that may be any. */
 const WHOLE = 3.2;
 
@@ -157,7 +154,7 @@ export class Forward extends RealRanges {
       this.setLocal(k, cos, sin, carried);
     } else if (format === 'exact') this.setLocal(k, 0, 0, carried);
     else {
-      const { cos, sin, both } = PRODUCTS[format].errors(
+      const { cos, sin, both } = ProductRounding.of(format).errors(
         this.angle.lo[k]!,
         this.angle.hi[k]!,
         carried + 4 * halfUnit(1, format),

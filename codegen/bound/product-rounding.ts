@@ -24,6 +24,7 @@ export interface PairErrors {
  * of p over a quarter turn; the sine has that of the complement.
  */
 export class ProductRounding {
+  private static readonly made = new Map<'f64' | 'f32', ProductRounding>();
   private readonly format: 'f64' | 'f32';
   private readonly cells: Float64Array;
   private readonly whole: PairErrors;
@@ -32,6 +33,13 @@ export class ProductRounding {
     this.format = format;
     this.cells = Float64Array.from({ length: CELLS.angle }, (_, cell) => this.cell(cell));
     this.whole = this.over(0, CELLS.angle - 1);
+  }
+
+  /** The table of a format, made when it is first asked for. */
+  static of(format: 'f64' | 'f32'): ProductRounding {
+    const made = ProductRounding.made.get(format) ?? new ProductRounding(format);
+    ProductRounding.made.set(format, made);
+    return made;
   }
 
   /**

@@ -1,5 +1,6 @@
 import type { Format } from '../kernel/choices.ts';
 import { halfUnit } from './rounding.ts';
+import type { Span } from './tape.ts';
 
 /** Cells of the angle over half a turn. */
 const CELLS = 96;
@@ -15,12 +16,6 @@ const MIDDLE = { cos: new Float64Array(CELLS), sin: new Float64Array(CELLS) };
 for (let k = 0; k < CELLS; k++) {
   MIDDLE.cos[k] = Math.cos(((k + 0.5) * Math.PI) / CELLS);
   MIDDLE.sin[k] = Math.sin(((k + 0.5) * Math.PI) / CELLS);
-}
-
-/** A closed range. */
-interface Span {
-  readonly lo: number;
-  readonly hi: number;
 }
 
 /**

@@ -45,8 +45,8 @@ class Solver {
   private readonly room: number;
   private readonly e: Node;
   private readonly convergence: KeplerConvergence;
-  private readonly start: Analysis;
-  private readonly steps: readonly Analysis[];
+  /** The starter, then the corrections. */
+  private readonly iterates: readonly Analysis[];
 
   constructor(lowered: Lowered, offset: Node, blocks: Blocks) {
     const { graph } = lowered;
@@ -59,22 +59,14 @@ class Solver {
     this.turn = { cos: cosM, sin: sinM, angle: graph.input('mean anomaly', 'tick') };
     const starter = { graph, sinM, cosM, e, guess: list[0]! };
     this.convergence = new KeplerConvergence(starter, lowered.kernel.choices.corrector, this.room);
-    this.start = this.analysis(list[0]!, undefined);
-    this.steps = list.slice(1).map((node, k) => this.analysis(node, list[k]!));
+    this.iterates = list.map((node, k) => this.analysis(node, list[k - 1]));
   }
 
   /** Bound on |computed D - exact D| over a cell. */
   error(M: Span, e: Span): CellError {
-    const exact = this.convergence.exact(M, e);
-    const grown = ({ lo, hi }: Span, by: number): Span => ({ lo: lo - by, hi: hi + by });
-    let rounding = this.start.rounding(M, e, exact);
-    let error = grown(this.convergence.start(M, e, exact), rounding);
-    for (const step of this.steps) {
-      rounding = step.rounding(M, e, { lo: exact.lo + error.lo, hi: exact.hi + error.hi });
-      error = grown(this.convergence.step(M, e, exact, error), rounding);
-    }
-    const most = Math.max(-error.lo, error.hi) * SLACK;
-    return Number.isNaN(most) ? { error: Infinity, rounding: 0 } : { error: most, rounding };
+    return this.convergence.error(M, e, this.iterates.length - 1, (k, D) =>
+      this.iterates[k]!.rounding(M, e, D),
+    );
   }
 
   private analysis(node: Node, previous: Node | undefined): Analysis {

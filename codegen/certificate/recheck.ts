@@ -15,12 +15,13 @@ import { importKernel } from '../observe/module.ts';
 import type { Worst } from '../observe/observe.ts';
 import { compareKernel } from '../parse/compare.ts';
 import { parseKernel } from '../parse/parse.ts';
+import type { ParsedKernel } from '../parse/parsed.ts';
 import { toKernel } from '../parse/to-kernel.ts';
 import { type Certificate, ERROR_KEY_OF_GROUP } from './certificate.ts';
 import { anatomyOf, FILES } from './files.ts';
 import { outputsDigest } from './outputs-digest.ts';
 
-/** What a recheck found, and how long its proof took. */
+/** What a recheck found. */
 export interface Recheck {
   readonly findings: readonly Finding[];
   /** What was proven of the file's own lines; empty when they are not those of the model. */
@@ -50,32 +51,19 @@ export async function recheck(
   const task = taskOf({ model: certificate.model, domain: certificate.domain.name, error: allowed }, source);
   const expected = makeVariant(task, certificate.choices);
   const file = join(folder, FILES.code);
-  const lines = compareLines(file, code, expected);
-  const text = compareFacts(folder, [
-    ['code', certificate.code, await codeSize(code)],
-    ['digest.kernel', certificate.digest.kernel, digest(code)],
-  ]);
-  const cheap = [
-    ...lines,
+  const { parsed, findings: lines } = compareLines(file, code, expected);
+  const facts = [
     ...(await compareCertificate(folder, certificate, task, expected, code)),
     ...(await replay(folder, certificate, task, worst, code)),
   ];
-  if (lines.some((finding) => finding.code !== 'parse.other-constant'))
-    return { findings: cheap, proofs: [] };
-  const kernel = toKernel(parseKernel(file, code), expected.kernel);
+  const others = lines.some((finding) => finding.code !== 'parse.other-constant');
+  if (parsed === undefined || others) return { findings: [...lines, ...facts], proofs: [] };
+  const kernel = toKernel(parsed, expected.kernel);
   const proofs = certify({ ...expected.lowered, kernel }, PROOF_EFFORT, progress);
   const remarks = remarksOf(kernel, certificate.error, proofs);
-  const due = describeVariant(task, expected.lowered, remarks).code;
-  const proven = compareProof(folder, certificate, kernel, proofs);
-  return {
-    findings: [
-      ...(lines.length > 0 ? lines : compareText(file, code, due)),
-      ...cheap.slice(lines.length),
-      ...text,
-      ...proven,
-    ],
-    proofs,
-  };
+  const { code: due } = describeVariant(task, expected.lowered, remarks);
+  const text = lines.length > 0 ? lines : compareText(file, code, due);
+  return { findings: [...text, ...facts, ...compareProof(folder, certificate, kernel, proofs)], proofs };
 }
 
 /** What was proven again beside what is stated. */
@@ -116,11 +104,17 @@ function compareText(file: string, code: string, expected: string): readonly Fin
   ];
 }
 
-function compareLines(file: string, code: string, expected: Variant): readonly Finding[] {
+/** Reads the emitted text back into lines and compares them with the kernel that the model gives. */
+function compareLines(
+  file: string,
+  code: string,
+  expected: Variant,
+): { readonly parsed?: ParsedKernel; readonly findings: readonly Finding[] } {
   try {
-    return compareKernel(parseKernel(file, code), expected.kernel, file);
+    const parsed = parseKernel(file, code);
+    return { parsed, findings: compareKernel(parsed, expected.kernel, file) };
   } catch (error) {
-    if (error instanceof InputError) return error.findings;
+    if (error instanceof InputError) return { findings: error.findings };
     throw error;
   }
 }
@@ -141,6 +135,8 @@ async function compareCertificate(
     ['domain.ranges', certificate.domain.ranges, ranges],
     ['operations', certificate.operations, expected.cost],
     ['state', certificate.state, { words: expected.kernel.state.length, bytes: expected.stateBytes }],
+    ['code', certificate.code, await codeSize(code)],
+    ['digest.kernel', certificate.digest.kernel, digest(code)],
     ['digest.model', certificate.digest.model, digest(printFormula(task.formula))],
     ['digest.outputs', certificate.digest.outputs, outputsDigest(judge, task.domain, names)],
   ];

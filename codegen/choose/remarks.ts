@@ -32,7 +32,8 @@ export function remarksOf(
 
 /** One sentence on the error of an output: figures are rounded up. */
 function errorSentence(key: string, { certified, observed }: ErrorPair): string {
-  return `Error ${key}: at most ${ceilTo3(certified)} (certified over the domain), ${ceilTo3(observed)} observed.`;
+  const figure = (x: number) => outward(x, 1, 3).toPrecision(3);
+  return `Error ${key}: at most ${figure(certified)} (certified over the domain), ${figure(observed)} observed.`;
 }
 
 function notesOf(kernel: Kernel, proofs: readonly GroupProof[]): ReadonlyMap<number, string> {
@@ -43,7 +44,7 @@ function notesOf(kernel: Kernel, proofs: readonly GroupProof[]): ReadonlyMap<num
     if (line.operation === 'input' || line.operation === 'constant') continue;
     const { lo, hi } = ranges[k]!;
     const range =
-      Number.isFinite(lo) && Number.isFinite(hi) ? [`[${outward(lo, -1)}, ${outward(hi, 1)}]`] : [];
+      Number.isFinite(lo) && Number.isFinite(hi) ? [`[${outward(lo, -1, 4)}, ${outward(hi, 1, 4)}]`] : [];
     const shares = proofs.flatMap(({ group, shares: list }) => {
       const share = list.get(k) ?? 0;
       if (share < LEAST_SHARE) return [];
@@ -55,19 +56,12 @@ function notesOf(kernel: Kernel, proofs: readonly GroupProof[]): ReadonlyMap<num
   return notes;
 }
 
-/** A number in four digits, rounded away from what lies on the other side. */
-function outward(x: number, side: -1 | 1): string {
-  if (x === 0) return '0';
-  const unit = 10 ** (Math.floor(Math.log10(Math.abs(x))) - 3);
+/** The number of so many digits next to a number on one side, or the number itself. */
+function outward(x: number, side: -1 | 1, digits: number): number {
+  if (x === 0) return 0;
+  const unit = 10 ** (Math.floor(Math.log10(Math.abs(x))) + 1 - digits);
   let steps = side * Math.floor((side * x) / unit);
-  const text = () => String(Number((steps * unit).toPrecision(4)));
-  while (side * (Number(text()) - x) < 0) steps += side;
-  return text();
-}
-
-/** Three digits, rounded up. */
-function ceilTo3(x: number): string {
-  const short = Number(x.toPrecision(3));
-  const unit = 10 ** (Math.floor(Math.log10(x)) - 2);
-  return (short >= x ? short : short + unit).toPrecision(3);
+  const found = () => Number((steps * unit).toPrecision(digits));
+  while (side * (found() - x) < 0) steps += side;
+  return found();
 }

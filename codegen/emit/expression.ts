@@ -1,6 +1,5 @@
+import { operationText } from '../formula/operation-text.ts';
 import { isRounded, type Kernel, type Line } from '../kernel/kernel.ts';
-
-const INFIX: Readonly<Record<string, string>> = { add: '+', sub: '-', mul: '*', div: '/' };
 
 /** The right-hand side of a line: one operation, with its rounding to float32 where the line is float32. */
 export function expression(kernel: Kernel, line: Line): string {
@@ -20,24 +19,13 @@ export function literal(value: number): string {
 }
 
 function operation(line: Line, args: readonly string[]): string {
-  const [a, b, c, d] = args;
   switch (line.operation) {
-    case 'add':
-    case 'sub':
-    case 'mul':
-    case 'div':
-      return `${a} ${INFIX[line.operation]} ${b}`;
-    case 'neg':
-      return `-${a}`;
-    case 'select':
-      return `${a} < ${b} ? ${c} : ${d}`;
     case 'round':
-      return `fround(${a})`;
-    case 'sqrt':
-    case 'abs':
-    case 'floor':
-      return `Math.${line.operation}(${a})`;
-    default:
+      return `fround(${args[0]})`;
+    case 'input':
+    case 'constant':
       throw new Error(`a line of kind ${line.operation} has no expression`);
+    default:
+      return operationText(line.operation, args);
   }
 }

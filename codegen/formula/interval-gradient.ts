@@ -3,16 +3,22 @@ import { inOrder } from './graph.ts';
 import type { Node } from './node.ts';
 import type { Bounds } from './ranges.ts';
 
+/** A node to compute, with the first registers of itself and of its arguments. */
+interface Step {
+  readonly node: Node;
+  readonly at: number;
+  readonly args: readonly number[];
+}
+
 /**
  * Ranges of nodes and of their derivatives by some variables, over boxes: forward differentiation in interval
  * arithmetic. Leaves are given with their own derivatives.
  */
 export class IntervalGradient {
-  private readonly nodes: readonly Node[];
   private readonly place: ReadonlyMap<Node, number>;
-  private readonly leaves: readonly Node[];
+  private readonly steps: readonly Step[];
   private readonly registers: interval.Intervals;
-  /** Registers of a node: its range, then its derivatives. */
+  /** Registers of a node, one after the other: its range, then its derivatives. */
   private readonly width: number;
   private readonly work: number;
 
@@ -22,46 +28,51 @@ export class IntervalGradient {
    * @param variables number of variables
    */
   constructor(roots: readonly Node[], leaves: readonly Node[], variables: number) {
-    this.leaves = leaves;
-    this.nodes = inOrder(roots, leaves);
-    this.place = new Map(this.nodes.map((node, k) => [node, k]));
+    const nodes = inOrder(roots, leaves);
     this.width = 1 + variables;
-    this.work = this.nodes.length * this.width;
+    this.place = new Map(nodes.map((node, k) => [node, k * this.width]));
+    this.steps = nodes
+      .filter((node) => !leaves.includes(node))
+      .map((node) => ({
+        node,
+        at: this.place.get(node)!,
+        args: node.args.map((arg) => this.place.get(arg)!),
+      }));
+    this.work = nodes.length * this.width;
     this.registers = new interval.Intervals(this.work + 4);
   }
 
   /** Gives a leaf its range and its derivatives. */
   give(leaf: Node, range: Bounds, derivatives: readonly Bounds[]): void {
-    const k = this.place.get(leaf);
-    if (k === undefined) return; // no root depends on it
+    const at = this.place.get(leaf);
+    if (at === undefined) return; // no root depends on it
     for (const [j, { lo, hi }] of [range, ...derivatives].entries())
-      interval.set(this.registers, k * this.width + j, lo, hi);
+      interval.set(this.registers, at + j, lo, hi);
   }
 
   /** Computes all nodes from the leaves. */
   run(): void {
-    for (const [k, node] of this.nodes.entries()) if (!this.leaves.includes(node)) this.evaluate(k, node);
+    for (const step of this.steps) this.evaluate(step);
   }
 
   /** The range of a root. */
   range(root: Node): Bounds {
-    return this.read(this.place.get(root)! * this.width);
+    return this.read(this.place.get(root)!);
   }
 
   /** The range of the derivative of a root by a variable. */
   derivative(root: Node, variable: number): Bounds {
-    return this.read(this.place.get(root)! * this.width + 1 + variable);
+    return this.read(this.place.get(root)! + 1 + variable);
   }
 
   private read(register: number): Bounds {
     return { lo: this.registers.lo[register]!, hi: this.registers.hi[register]! };
   }
 
-  private evaluate(k: number, node: Node): void {
+  private evaluate({ node, at, args }: Step): void {
     const r = this.registers;
-    const { width, work } = this;
-    const at = k * width;
-    const [a = 0, b = 0, x = 0, y = 0] = node.args.map((arg) => this.place.get(arg)! * width);
+    const { work } = this;
+    const [a = 0, b = 0, x = 0, y = 0] = args;
     const factor = work + 2;
     switch (node.operation) {
       case 'constant':

@@ -1,6 +1,9 @@
 /** Arithmetic of a stage: float64, or float32 with one rounding an operation. */
 export type Format = 'f64' | 'f32';
 
+/** Bits of a number of each format. */
+export const BITS: Readonly<Record<Format, number>> = { f64: 53, f32: 24 };
+
 /** First guess for Kepler's equation; the functions stand in src/kepler/starters.ts. */
 export type Starter = 'firstOrder' | 'secondOrder' | 'thirdOrder' | 'danby' | 'secant';
 

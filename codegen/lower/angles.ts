@@ -6,7 +6,6 @@ import {
   doubleAngle,
   eccentricAnomaly,
   oppositeAngle,
-  slope,
   sumOfAngles,
   trueAnomaly,
 } from './exact-rules.ts';
@@ -170,14 +169,12 @@ export class AngleRules {
 
   /** The direction of (x, y), or the true anomaly where it is one. */
   private direction(y: Node, x: Node): Turn {
-    const { graph } = this;
     const [sine, cosine] = [this.rewrite(y), this.rewrite(x)];
     const orbit = findTrueAnomaly(y, x);
     if (orbit === undefined) return this.turned(direction, cosine, sine);
     const E = this.turn(orbit.E);
     const e = this.rewrite(orbit.e);
-    const inverse = graph.make('div', graph.constant(1), slope(graph, e, E.cos));
-    const anomaly = { E, e, root: this.rewrite(orbit.root), sine: graph.make('mul', E.sin, inverse) };
+    const anomaly = { E, e, root: this.rewrite(orbit.root) };
     return { ...this.turned(trueAnomaly, cosine, sine, E.cos, e), anomaly };
   }
 }

@@ -93,8 +93,7 @@ class Pass {
       radius <= LARGEST_PLAIN_RADIUS
         ? this.plain(node, x, radius, format)
         : this.reduced(node, x, radius, format);
-    const rule = `${node.operation === 'sin' ? 'sine' : 'cosine'} by a polynomial${radius <= LARGEST_PLAIN_RADIUS ? '' : ' of the angle reduced to a quarter turn'}`;
-    this.replacements.set(node, { rule, node: made, error, radius });
+    this.replacements.set(node, { node: made, error, radius });
     return made;
   }
 
@@ -122,8 +121,13 @@ class Pass {
     const sizes = iterateSizes(node, list, e);
     for (const [k, iterate] of list.entries()) this.ranges.assert(iterate, { lo: -sizes[k]!, hi: sizes[k]! });
     const made = this.visit(list.at(-1)!);
-    const rule = "Kepler's equation by a capped solver";
-    this.replacements.set(node, { rule, node: made, error: solverError(this.choices, e) });
+    const { choices } = this;
+    this.replacements.set(node, {
+      node: made,
+      get error() {
+        return solverError(choices, e); // takes a while: proven when it is asked for
+      },
+    });
     return made;
   }
 }

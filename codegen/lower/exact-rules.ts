@@ -84,15 +84,11 @@ export const trueAnomaly: ExactRule = exactRule({
     given: (graph, free) => [...pointOfOrbit(graph, free), graph.make('cos', free[0]!), free[1]!],
   },
   apply: (graph, [x, y, cosE, e]) => {
-    const inverse = graph.make('div', graph.constant(1), slope(graph, e!, cosE!));
+    const slope = graph.make('sub', graph.constant(1), graph.make('mul', e!, cosE!));
+    const inverse = graph.make('div', graph.constant(1), slope);
     return [graph.make('mul', x!, inverse), graph.make('mul', y!, inverse)];
   },
 });
-
-/** 1 - e cos E. */
-export function slope(graph: Graph, e: Node, cosE: Node): Node {
-  return graph.make('sub', graph.constant(1), graph.make('mul', e, cosE));
-}
 
 function pointOfOrbit(graph: Graph, [E, e]: readonly Node[]): readonly [Node, Node] {
   const root = graph.make('sqrt', graph.make('sub', graph.constant(1), graph.make('mul', e!, e!)));

@@ -9,8 +9,8 @@ export interface Hoisted {
 }
 
 /**
- * Regroups products: the factors of a product of the tick that setup knows are multiplied there. A product that several nodes read stays as it is: taking it apart would compute it several times, and the
- * formula would lose its shape.
+ * Regroups products: the factors of a product of the tick that setup knows are multiplied there. A product that several
+ * nodes read stays as it is: taking it apart would compute it several times, and the formula would lose its shape.
  */
 export function hoistProducts(graph: Graph, formula: Formula): Hoisted {
   const done = new Map<Node, Node>();

@@ -2,14 +2,13 @@ import { Evaluator } from '../formula/evaluate.ts';
 import { Graph } from '../formula/graph.ts';
 import type { Node, Stage } from '../formula/node.ts';
 
-/** A true anomaly as a turn: cos = (cos E - e) / (1 - e cos E), sin = root sine with sine = sin E / (1 - e cos E). */
+/** What a true anomaly is made of: cos = (cos E - e) / (1 - e cos E), sin = root sin E / (1 - e cos E). */
 export interface Anomaly<T> {
   /** The turn of the eccentric anomaly. */
   readonly E: T;
   readonly e: Node;
   /** sqrt(1 - e^2). */
   readonly root: Node;
-  readonly sine: Node;
 }
 
 /** An angle carried as its cosine and sine. */
@@ -27,8 +26,6 @@ export interface Turn {
  * over the domain.
  */
 export interface Replacement {
-  /** The rule, in the words of the trade. */
-  readonly rule: string;
   readonly node: Node;
   /** Proven bound on |replacement - original|, in the unit of the node; Infinity where none can be proven. */
   readonly error: number;

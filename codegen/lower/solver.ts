@@ -51,11 +51,8 @@ export function solverError(choices: Pick<Choices, 'starter' | 'corrector' | 'ca
   const guess = applyFunction(graph, STARTERS, starter, [sinM, cosM, eNode]);
   const convergence = new KeplerConvergence({ graph, sinM, cosM, e: eNode, guess }, corrector);
   const table = errorsByCell(e, (M, cell) => {
-    const exact = convergence.exact(M, cell);
-    let error = convergence.start(M, cell, exact);
-    for (let step = 0; step < cap; step++) error = convergence.step(M, cell, exact, error);
-    const most = Math.max(-error.lo, error.hi);
-    return most < Infinity ? { error: most, rounding: most } : { error: Infinity, rounding: 0 };
+    const { error } = convergence.error(M, cell, cap);
+    return { error, rounding: error < Infinity ? error : 0 }; // a bound that is finite is taken as it is
   });
   const error = table.offset({ lo: -Math.PI, hi: Math.PI }, e);
   proven.set(key, error);

@@ -1,5 +1,7 @@
 import type { Domain } from '../../src/models/description.ts';
 import type { Random } from '../numbers/random.ts';
+import { type Candidate, keep } from './evolve.ts';
+import { clamp } from './points.ts';
 import type { RoundingModel } from './rounding-model.ts';
 
 /** How hard to align the roundings of lines. */
@@ -96,22 +98,21 @@ export class Alignment {
     const whole = parts.reduce((sum, { largest }) => sum + largest, 0);
     const counting = parts.filter(({ largest }) => largest > (whole * NEGLIGIBLE) / parts.length);
     const weights = new Map(counting.map(({ line, weight }) => [line, weight]));
-    let carried: readonly { readonly point: Float64Array; readonly score: number }[] = [{ point, score: 0 }];
+    let carried: readonly Candidate[] = [{ values: point, size: 0 }];
     for (const { inputs, lines } of this.groups([...weights.keys()])) {
       const score = model.score(
         lines,
         lines.map((k) => weights.get(k)!),
       );
-      const kept: { point: Float64Array; score: number }[] = [];
+      const kept: Candidate[] = [];
       for (let k = 0; k < draws; k++, tick()) {
-        const moved = carried[k % carried.length]!.point.slice();
+        const moved = carried[k % carried.length]!.values.slice();
         for (const input of inputs) this.move(moved, input, NEAR);
-        const size = score(moved);
-        if (kept.length < CARRIED || size > kept.at(-1)!.score) keep(kept, { point: moved, score: size });
+        keep(kept, { values: moved, size: score(moved) }, CARRIED);
       }
       carried = kept;
     }
-    return carried.map((entry) => entry.point);
+    return carried.map((entry) => entry.values);
   }
 
   /** Inputs in the order in which they are fixed, and the lines that depend on no others by then. */
@@ -151,12 +152,6 @@ export class Alignment {
   }
 }
 
-function keep<T extends { readonly score: number }>(list: T[], entry: T): void {
-  const place = list.findIndex((other) => other.score < entry.score);
-  list.splice(place < 0 ? list.length : place, 0, entry);
-  list.length = Math.min(list.length, CARRIED);
-}
-
 /** Directions in which errors are added up: of three outputs the axes and diagonals of a cube. */
 function directionsOf(outputs: number): readonly (readonly number[])[] {
   if (outputs !== 3) return Array.from({ length: outputs }, (_, k) => unit(outputs, k));
@@ -169,8 +164,4 @@ function directionsOf(outputs: number): readonly (readonly number[])[] {
 
 function unit(length: number, place: number): readonly number[] {
   return Array.from({ length }, (_, k) => (k === place ? 1 : 0));
-}
-
-function clamp(x: number, min: number, max: number): number {
-  return Math.min(Math.max(x, min), max);
 }

@@ -1,5 +1,6 @@
 import type { Domain } from '../../src/models/description.ts';
 import type { Random } from '../numbers/random.ts';
+import { clamp } from './points.ts';
 
 /** A point as the values of the inputs, and the size of the error there. */
 export interface Candidate {
@@ -75,6 +76,10 @@ export class Evolution {
   }
 }
 
-function clamp(x: number, min: number, max: number): number {
-  return Math.min(Math.max(x, min), max);
+/** Keeps the `count` candidates with the largest errors in a list, largest first. */
+export function keep(list: Candidate[], candidate: Candidate, count: number): void {
+  if (list.length === count && candidate.size <= list.at(-1)!.size) return;
+  const place = list.findIndex((other) => other.size < candidate.size);
+  list.splice(place < 0 ? list.length : place, 0, candidate);
+  list.length = Math.min(list.length, count);
 }

@@ -30,7 +30,8 @@ export class Judge {
   private readonly state: Float64Array;
   private readonly out: Float64Array;
   private readonly frameRate: number;
-  private readonly screen: Screen;
+  private readonly formula: Formula;
+  private screen: Screen | undefined;
   private readonly screened: Float64Array;
 
   /**
@@ -47,7 +48,7 @@ export class Judge {
     this.members = this.groups.map((group) => members.filter((member) => member.group === group));
     this.state = new Float64Array(module.stateWords);
     this.out = new Float64Array(formula.outputs.length);
-    this.screen = screenOf(formula);
+    this.formula = formula;
     this.screened = new Float64Array(formula.outputs.length);
   }
 
@@ -67,8 +68,7 @@ export class Judge {
    * @throws RangeError if the kernel refuses a point of its domain
    */
   errors(point: Point): ReadonlyMap<string, GroupError> {
-    const status = this.run(point);
-    if (status !== 0) throw new RangeError(`the kernel gives status ${status} at ${JSON.stringify(point)}`);
+    this.demand(point);
     this.evaluator.run(point);
     return new Map(
       this.groups.map((group, k) => [group, { size: Math.hypot(...this.differences(this.members[k]!)) }]),
@@ -77,9 +77,9 @@ export class Judge {
 
   /** Size of the error of every group against the formula in float64: of float32 kernels, to some digits. */
   roughErrors(point: Point): ReadonlyMap<string, number> {
-    const status = this.run(point);
-    if (status !== 0) throw new RangeError(`the kernel gives status ${status} at ${JSON.stringify(point)}`);
+    this.demand(point);
     const { out, screened } = this;
+    this.screen ??= screenOf(this.formula);
     this.screen(point, screened);
     return new Map(
       this.groups.map((group, k) => {
@@ -106,6 +106,12 @@ export class Judge {
       parts: [dot(vector, axes.radial), dot(vector, axes.along), dot(vector, axes.cross)],
     });
     return errors;
+  }
+
+  /** Runs the kernel, which must not refuse the point. */
+  private demand(point: Point): void {
+    const status = this.run(point);
+    if (status !== 0) throw new RangeError(`the kernel gives status ${status} at ${JSON.stringify(point)}`);
   }
 
   private differences(members: readonly Member[]): number[] {

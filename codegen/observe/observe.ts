@@ -2,7 +2,7 @@ import type { Domain } from '../../src/models/description.ts';
 import type { Kernel } from '../kernel/kernel.ts';
 import { Random } from '../numbers/random.ts';
 import { Alignment } from './alignment.ts';
-import { type Candidate, Evolution } from './evolve.ts';
+import { type Candidate, Evolution, keep } from './evolve.ts';
 import type { Judge } from './judge.ts';
 import { type Point, Points } from './points.ts';
 import { RoundingModel } from './rounding-model.ts';
@@ -165,14 +165,6 @@ class Search {
     this.done++;
     if (this.done % 1000 === 0) this.progress(Math.min(1, this.done / this.work));
   };
-}
-
-/** Keeps the worst `count` candidates, worst first. */
-function keep(list: Candidate[], candidate: Candidate, count: number): void {
-  if (list.length === count && candidate.size <= list.at(-1)!.size) return;
-  const place = list.findIndex((other) => other.size < candidate.size);
-  list.splice(place < 0 ? list.length : place, 0, candidate);
-  list.length = Math.min(list.length, count);
 }
 
 function largestParts(judge: Judge, group: string, list: readonly Worst[]): Observed['parts'] {

@@ -29,6 +29,7 @@ export class Points {
   }
 }
 
-function clamp(x: number, min: number, max: number): number {
+/** The nearest number of a range. */
+export function clamp(x: number, min: number, max: number): number {
   return Math.min(Math.max(x, min), max);
 }

@@ -1,11 +1,7 @@
-import type { Format } from '../kernel/choices.ts';
-import type { Kernel, Line } from '../kernel/kernel.ts';
-
-/** Rounded operations: their lines have errors of their own. */
-const ROUNDED: readonly string[] = ['add', 'sub', 'mul', 'div', 'sqrt', 'round'];
-
-/** Bits of a number of each format. */
-const BITS: Readonly<Record<Format, number>> = { f64: 53, f32: 24 };
+import { operationText } from '../formula/operation-text.ts';
+import { BITS } from '../kernel/choices.ts';
+import { isRounded, type Kernel, type Line, type Operation } from '../kernel/kernel.ts';
+import { lineValue } from '../kernel/line-value.ts';
 
 /**
  * The error of some outputs of a kernel as a sum over its lines: what each line rounds, times how far that moves the
@@ -30,7 +26,7 @@ export class RoundingModel {
     this.kernel = kernel;
     this.inputs = inputs;
     this.outputs = outputs;
-    this.rounded = kernel.lines.flatMap((line, k) => (ROUNDED.includes(line.operation) ? [k] : []));
+    this.rounded = kernel.lines.flatMap((line, k) => (rounds(line.operation) ? [k] : []));
     this.values = new Float64Array(kernel.lines.length);
     this.adjoints = new Float64Array(kernel.lines.length * outputs.length);
   }
@@ -63,7 +59,8 @@ export class RoundingModel {
     const { lines } = this.kernel;
     const { values, adjoints } = this;
     const count = this.outputs.length;
-    for (let k = 0; k < lines.length; k++) values[k] = this.value(lines[k]!, point);
+    const input = (name: string) => point[this.inputs.indexOf(name)]!;
+    for (let k = 0; k < lines.length; k++) values[k] = lineValue(lines[k]!, values, input);
     adjoints.fill(0);
     for (const [i, output] of this.outputs.entries()) adjoints[output * count + i]! += 1;
     for (let k = lines.length - 1; k >= 0; k--) this.pass(k, lines[k]!);
@@ -122,33 +119,24 @@ export class RoundingModel {
     )(addError, mulError) as (point: Float64Array) => number;
   }
 
-  private expression({ operation, args, value, name, format }: Line): string {
-    const [a, b, x, y] = args.map((arg) => `v${arg}`);
-    const plain = (() => {
-      switch (operation) {
-        case 'input':
-          return `x[${this.inputs.indexOf(name)}]`;
-        case 'constant':
-          return String(value);
-        case 'add':
-          return `${a} + ${b}`;
-        case 'sub':
-          return `${a} - ${b}`;
-        case 'mul':
-          return `${a} * ${b}`;
-        case 'div':
-          return `${a} / ${b}`;
-        case 'neg':
-          return `-${a}`;
-        case 'select':
-          return `${a} < ${b} ? ${x} : ${y}`;
-        case 'round':
-          return `${a}`;
-        default:
-          return `Math.${operation}(${a})`;
-      }
-    })();
-    return format === 'f32' && ROUNDED.includes(operation) ? `Math.fround(${plain})` : plain;
+  private expression(line: Line): string {
+    const { operation, format } = line;
+    const plain = this.unrounded(line);
+    return format === 'f32' && rounds(operation) ? `Math.fround(${plain})` : plain;
+  }
+
+  private unrounded({ operation, args, value, name }: Line): string {
+    const names = args.map((arg) => `v${arg}`);
+    switch (operation) {
+      case 'input':
+        return `x[${this.inputs.indexOf(name)}]`;
+      case 'constant':
+        return String(value);
+      case 'round':
+        return names[0]!;
+      default:
+        return operationText(operation, names);
+    }
   }
 
   /** Computed minus exact, of one line. */
@@ -156,7 +144,7 @@ export class RoundingModel {
     const { operation, args, format } = this.kernel.lines[k]!;
     const [a, b = ''] = args.map((arg) => `v${arg}`) as [string, string?];
     if (format === 'f32' && operation !== 'div' && operation !== 'sqrt')
-      return `v${k} - (${this.expression({ ...this.kernel.lines[k]!, format: 'f64' })})`;
+      return `v${k} - (${this.unrounded(this.kernel.lines[k]!)})`;
     switch (operation) {
       case 'add':
         return `addError(${a}, ${b}, v${k})`;
@@ -170,34 +158,6 @@ export class RoundingModel {
         return `(v${k} * v${k} - ${a} - mulError(v${k}, v${k}, v${k} * v${k})) / (2 * v${k} || 1)`;
       default:
         return '0';
-    }
-  }
-
-  private value({ operation, args, value, name }: Line, point: Float64Array): number {
-    const { values } = this;
-    const a = values[args[0]!]!;
-    const b = values[args[1]!]!;
-    switch (operation) {
-      case 'input':
-        return point[this.inputs.indexOf(name)]!;
-      case 'constant':
-        return value;
-      case 'add':
-        return a + b;
-      case 'sub':
-        return a - b;
-      case 'mul':
-        return a * b;
-      case 'div':
-        return a / b;
-      case 'neg':
-        return -a;
-      case 'round':
-        return a;
-      case 'select':
-        return a < b ? values[args[2]!]! : values[args[3]!]!;
-      default:
-        return Math[operation](a);
     }
   }
 
@@ -238,6 +198,11 @@ export class RoundingModel {
     const count = this.outputs.length;
     for (let i = 0; i < count; i++) adjoints[to * count + i]! += adjoints[from * count + i]! * slope;
   }
+}
+
+/** Whether a line of an operation has an error of its own. */
+function rounds(operation: Operation): boolean {
+  return operation === 'round' || isRounded(operation);
 }
 
 /** s - (a + b), exactly, for s the float64 sum. Source: Knuth, The Art of Computer Programming, volume 2, section 4.2.2. */

@@ -1,6 +1,7 @@
 import { eccentricAnomaly } from '../../src/kepler/eccentric-anomaly.ts';
 import { inOrder } from '../formula/graph.ts';
 import type { Formula, Node } from '../formula/node.ts';
+import { operationText } from '../formula/operation-text.ts';
 import type { Point } from './points.ts';
 
 /** A formula as a function: writes the outputs at a point. */
@@ -24,27 +25,14 @@ export function screenOf(formula: Formula): Screen {
 
 function expression(node: Node, name: ReadonlyMap<Node, string>): string {
   const args = node.args.map((arg) => name.get(arg)!);
-  const [a, b, x, y] = args;
   switch (node.operation) {
     case 'input':
       return `point[${JSON.stringify(node.name)}]`;
     case 'constant':
       return String(node.value);
-    case 'add':
-      return `${a} + ${b}`;
-    case 'sub':
-      return `${a} - ${b}`;
-    case 'mul':
-      return `${a} * ${b}`;
-    case 'div':
-      return `${a} / ${b}`;
-    case 'neg':
-      return `-${a}`;
-    case 'select':
-      return `${a} < ${b} ? ${x} : ${y}`;
     case 'kepler':
-      return `kepler(${a}, ${b})`;
+      return `kepler(${args.join(', ')})`;
     default:
-      return `Math.${node.operation}(${args.join(', ')})`;
+      return operationText(node.operation, args);
   }
 }

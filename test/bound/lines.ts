@@ -1,7 +1,8 @@
 import { taskOf } from '../../codegen/choose/task.ts';
 import type { Task } from '../../codegen/choose/variant.ts';
 import type { Choices } from '../../codegen/kernel/choices.ts';
-import { isRounded, type Kernel, type Line } from '../../codegen/kernel/kernel.ts';
+import { isRounded, type Kernel } from '../../codegen/kernel/kernel.ts';
+import { lineValue } from '../../codegen/kernel/line-value.ts';
 import { type Lowered, lower } from '../../codegen/lower/lower.ts';
 
 /** A model, domain and choices that the tests of the proof run on. */
@@ -11,9 +12,9 @@ export interface Subject {
   readonly lowered: Lowered;
 }
 
-/** Lowers a model for a test. */
-export function subject(model: string, domain: string, choices: Partial<Choices>): Subject {
-  const all: Choices = {
+/** Float64 throughout and two corrections, unless a test says otherwise. */
+export function choicesOf(choices: Partial<Choices>): Choices {
+  return {
     setup: 'f64',
     tick: 'f64',
     starter: 'secondOrder',
@@ -21,6 +22,11 @@ export function subject(model: string, domain: string, choices: Partial<Choices>
     cap: 2,
     ...choices,
   };
+}
+
+/** Lowers a model for a test. */
+export function subject(model: string, domain: string, choices: Partial<Choices>): Subject {
+  const all = choicesOf(choices);
   const task = taskOf({ model, domain, error: { position_m: 1 } }, 'budget');
   return { name: `${model} ${all.setup}/${all.tick}`, task, lowered: lower(task.formula, task.domain, all) };
 }
@@ -40,38 +46,12 @@ export function runLines(
   given: ReadonlyMap<number, number> = new Map(),
 ): Float64Array {
   const values = new Float64Array(kernel.lines.length);
+  const input = (name: string) => inputs[name] ?? 0;
   for (const [k, line] of kernel.lines.entries()) {
-    const plain = given.get(k) ?? lineValue(line, inputs, values);
-    const rounded = line.format === 'f32' && isRounded(line.operation) ? Math.fround(plain) : plain;
+    const plain = given.get(k) ?? lineValue(line, values, input);
+    const rounding = line.operation === 'round' || (line.format === 'f32' && isRounded(line.operation));
+    const rounded = rounding ? Math.fround(plain) : plain;
     values[k] = rounded + (changes.get(k) ?? 0);
   }
   return values;
-}
-
-function lineValue(line: Line, inputs: Readonly<Record<string, number>>, values: Float64Array): number {
-  const [a = 0, b = 0, x = 0, y = 0] = line.args.map((arg) => values[arg]!);
-  switch (line.operation) {
-    case 'input':
-      return inputs[line.name] ?? 0;
-    case 'constant':
-      return line.value;
-    case 'add':
-      return a + b;
-    case 'sub':
-      return a - b;
-    case 'mul':
-      return a * b;
-    case 'div':
-      return a / b;
-    case 'neg':
-      return -a;
-    case 'select':
-      return a < b ? x : y;
-    case 'round':
-      return Math.fround(a);
-    case 'sqrt':
-    case 'abs':
-    case 'floor':
-      return Math[line.operation](a);
-  }
 }

@@ -3,7 +3,7 @@ import type { Choices } from '../../codegen/kernel/choices.ts';
 import { lower } from '../../codegen/lower/lower.ts';
 import { readModel } from '../../codegen/read/model.ts';
 import type { ModelDescription } from '../../src/models/description.ts';
-import type { Subject } from './lines.ts';
+import { choicesOf, type Subject } from './lines.ts';
 
 /** A model small enough that every one of its roundings shows: its text and the ranges of its inputs. */
 export interface SmallModel {
@@ -18,14 +18,7 @@ export interface SmallModel {
 
 /** Reads and lowers a small model. Its one output group is `position` for a record and `value` for a number. */
 export function smallSubject(small: SmallModel, choices: Partial<Choices>): Subject {
-  const all: Choices = {
-    setup: 'f64',
-    tick: 'f64',
-    starter: 'secondOrder',
-    corrector: 'newton',
-    cap: 2,
-    ...choices,
-  };
+  const all = choicesOf(choices);
   const fields = Object.keys(small.ranges).filter((name) => name !== 't');
   const group = small.returns.startsWith('{') ? 'position' : 'value';
   const domain = Object.fromEntries(

@@ -1,6 +1,7 @@
 import { Evaluator } from '../../../codegen/formula/evaluate.ts';
 import type { Node } from '../../../codegen/formula/node.ts';
 import type { Line } from '../../../codegen/kernel/kernel.ts';
+import { lineValue } from '../../../codegen/kernel/line-value.ts';
 import type { Point } from '../../../codegen/observe/points.ts';
 import { RoundingModel } from '../../../codegen/observe/rounding-model.ts';
 import { runLines, type Subject } from '../lines.ts';
@@ -55,8 +56,9 @@ export class Adversary {
   worst(point: Point): AdverseRun {
     const { kernel } = this.subject.lowered;
     const plain = runLines(kernel, point);
+    const input = (name: string) => point[name]!;
     const inexact = kernel.lines.map(
-      (line, k) => line.format === 'f32' && plain[k] !== unrounded(line, point, plain),
+      (line, k) => line.format === 'f32' && plain[k] !== lineValue(line, plain, input),
     );
     this.evaluator.run(point);
     const exact = this.nodes.map((node) => this.evaluator.value(node).hi);
@@ -86,7 +88,7 @@ export class Adversary {
       if (inexact[line]) side[line] = Math.sign(weight);
     const values = new Float64Array(lines.length);
     for (const [k, line] of lines.entries()) {
-      const value = unrounded(line, point, values);
+      const value = lineValue(line, values, (name) => point[name]!);
       values[k] = value + side[k]! * reach(line, value, side[k]!, values);
     }
     const error = this.outputs.map((output, i) => values[output]! - exact[i]!);
@@ -104,31 +106,4 @@ function reach({ operation, args, value }: Line, result: number, side: number, v
   const near = Math.min(half, toPower);
   if (operation !== 'add' && operation !== 'sub') return near;
   return Math.min(near, Math.abs(values[args[0]!]!), Math.abs(values[args[1]!]!));
-}
-
-/** What a line gives before any rounding to float32. */
-function unrounded(line: Line, inputs: Point, values: Float64Array): number {
-  const [a = 0, b = 0, x = 0, y = 0] = line.args.map((arg) => values[arg]!);
-  switch (line.operation) {
-    case 'input':
-      return inputs[line.name]!;
-    case 'constant':
-      return line.value;
-    case 'add':
-      return a + b;
-    case 'sub':
-      return a - b;
-    case 'mul':
-      return a * b;
-    case 'div':
-      return a / b;
-    case 'neg':
-      return -a;
-    case 'select':
-      return a < b ? x : y;
-    case 'round':
-      return a;
-    default:
-      return Math[line.operation](a);
-  }
 }

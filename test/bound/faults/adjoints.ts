@@ -155,8 +155,8 @@ export const ADJOINTS: readonly Fault[] = [
   {
     name: 'no distance of the faces of the net',
     file: 'bound/norm.ts',
-    find: 'Math.max(at(corners[0]), at(corners[1]), at(corners[2])) / distance;',
-    replace: 'Math.max(at(corners[0]), at(corners[1]), at(corners[2]));',
+    find: 'Math.max(at(a), at(b), at(c)) / distance;',
+    replace: 'Math.max(at(a), at(b), at(c));',
   },
   {
     name: 'faces of the net that are left out',
